@@ -1,0 +1,61 @@
+import type { Unit } from '../../shared/part/document';
+import type { BendResult, Solved } from '../../shared/result';
+import { formatAngle, formatLength } from '../../shared/units/format';
+import { exactFigure, lengthFigure, stationFigures } from './figures';
+import { wrap } from './lettering';
+import { TYPE } from './paper-size';
+import { METHOD_NAMES, faceUp, lineName } from './part-words';
+import type { SheetFlow } from './sheet-flow';
+import { cellRoom, columnWidths, drawTable } from './table';
+import type { Cell, Column } from './table';
+
+const STATION = 25.5;
+
+const COLUMNS: readonly Column[] = [
+  { head: ['line'], width: 10 },
+  { head: ['name in', 'the chain'], width: 'rest' },
+  { head: ['turn,', 'face up'], width: 18 },
+  { head: ['angle'], width: 25 },
+  { head: ['inside', 'radius'], width: 16, align: 'right' },
+  { head: ['allowance', 'BA'], width: 18, align: 'right' },
+  { head: ['setback', 'mold line'], width: 16, align: 'right' },
+  { head: ['tangent', 'start'], width: STATION, align: 'right' },
+  { head: ['bend line', '(centre)'], width: STATION, align: 'right' },
+  { head: ['tangent', 'end'], width: STATION, align: 'right' },
+  { head: ['sight line,', 'datum side under', 'the nose'], width: STATION, align: 'right' },
+  { head: ['sight line,', 'far side under', 'the nose'], width: STATION, align: 'right' },
+];
+
+/** Everything that is marked and set for each bend line, with every station in each way that a shop reads one. */
+export function drawLineSchedule(flow: SheetFlow, result: Solved): void {
+  const room = cellRoom(columnWidths(COLUMNS, flow.area.width)[1] ?? 0);
+  const rows = result.bends.map((bend, index) => rowOf(bend, index, result, room));
+  const { unit } = result;
+  const ways =
+    unit === 'in'
+      ? 'inches; under each the nearest 1/64 with its miss (mark − station), and millimetres'
+      : 'millimetres; under each inches';
+  drawTable(flow, `Line schedule: stations from the net datum edge, ${ways}`, COLUMNS, rows);
+}
+
+function rowOf(bend: BendResult, index: number, { unit, joggles }: Solved, room: number): Cell[] {
+  const joggle = bend.joggle === null ? undefined : joggles[bend.joggle];
+  const name = bend.name ?? (joggle ? `joggle ${(bend.joggle ?? 0) + 1}` : '');
+  const { sightLine } = bend;
+  return [
+    { lines: [lineName(index)], weight: 'semibold' },
+    { lines: wrap(name, room, TYPE.body, 3), even: true },
+    { lines: [bend.turn, faceUp(bend)] },
+    { lines: [formatAngle(bend.angle), `${formatAngle(180 - bend.angle)} between`, 'legs'] },
+    { lines: [exactFigure(bend.radius, unit), `nose ${exactFigure(bend.noseRadius, unit)}`] },
+    { lines: [lengthFigure(bend.allowance, unit), `K ${formatLength(bend.kFactor, 'in')}`, METHOD_NAMES[bend.method]] },
+    { lines: [bend.setback === null ? 'none' : lengthFigure(bend.setback, unit)] },
+    stationCell(bend.tangentStart, unit),
+    { ...stationCell(bend.centre, unit), weight: 'semibold' },
+    stationCell(bend.tangentEnd, unit),
+    stationCell(sightLine?.startUnderNose ?? null, unit),
+    stationCell(sightLine?.endUnderNose ?? null, unit),
+  ];
+}
+
+export const stationCell = (value: number | null, unit: Unit): Cell => ({ lines: stationFigures(value, unit) });

@@ -1,0 +1,21 @@
+/** What every check is given, and how it answers. */
+import type { Layout } from '../layout/lay-out';
+import type { PartFigures } from '../part/figures';
+import type { Finding } from '../result';
+
+export interface CheckInput {
+  readonly figures: PartFigures;
+  readonly layout: Layout;
+  /** Pairs of chain indices where the formed part meets itself; empty when it could not be formed. */
+  readonly crossings: readonly (readonly [number, number])[];
+}
+
+export type Check = (input: CheckInput) => readonly Finding[];
+
+/** A name for a leg in a sentence: its own, else "Leg 2" (counted from 1, as people do). */
+export function legName(name: string | null, index: number): string {
+  return name === null || name.trim() === '' ? `Leg ${index + 1}` : name.trim();
+}
+
+/** Figures in sentences: enough digits to act on, no more. */
+export const shown = (value: number): string => String(Number(value.toPrecision(5)));

@@ -1,0 +1,15 @@
+import type { Check } from './check';
+
+/** A name that the reference table does not hold leaves mass and springback open. */
+export const materialUnknown: Check = ({ figures }) =>
+  figures.unknownMaterial === null
+    ? []
+    : [
+        {
+          level: 'note',
+          code: 'material-unknown',
+          at: '',
+          message: `"${figures.unknownMaterial.slice(0, 60)}" is not in the table of materials: mass and springback are left open. Give its density, modulus and yield stress with the part.`,
+          source: 'table of materials',
+        },
+      ];

@@ -1,0 +1,24 @@
+import type { Finding, FindingLevel } from '../result';
+import type { Check, CheckInput } from './check';
+import { grainAlongBend } from './grain-along-bend';
+import { joggleRunTooShort } from './joggle-run-too-short';
+import { kAboveHalf } from './k-above-half';
+import { legConsumed } from './leg-consumed';
+import { legsCross } from './legs-cross';
+import { materialUnknown } from './material-unknown';
+
+const CHECKS: readonly Check[] = [
+  legConsumed,
+  joggleRunTooShort,
+  legsCross,
+  kAboveHalf,
+  grainAlongBend,
+  materialUnknown,
+];
+
+const RANK: Readonly<Record<FindingLevel, number>> = { stop: 0, caution: 1, note: 2 };
+
+/** Every finding of a part, stops first; within a level in the order of the checks, then along the chain. */
+export function runChecks(input: CheckInput): readonly Finding[] {
+  return CHECKS.flatMap((check) => check(input)).sort((a, b) => RANK[a.level] - RANK[b.level]);
+}

@@ -1,0 +1,124 @@
+/** The one gate for documents from outside: storage, files, requests, the clipboard. */
+import { z } from 'zod';
+import type { FieldError, Refused } from '../result';
+import type { PartDocument } from './document';
+import { expectedAt } from './expected';
+import { bendSchema, frameSchema, joggleSchema, legSchema } from './schema';
+
+export const MOST_BENDS = 200;
+/** A chain of 200 bends has 401 entries; a longer list is refused before it is read. */
+const LONGEST_CHAIN = 2 * MOST_BENDS + 1;
+const MOST_ERRORS = 50;
+
+export type Restored = { readonly ok: true; readonly document: PartDocument } | Refused;
+
+/**
+ * A part document from a value of unknown origin. Shape only: expressions are judged when they are evaluated.
+ *
+ * @param value anything at all, e.g. the outcome of JSON.parse; never changed
+ * @returns the document, or every error with the path of its field
+ * @example restore(null).ok // false
+ */
+export function restore(value: unknown): Restored {
+  if (typeof value !== 'object' || value === null || Array.isArray(value)) {
+    return refused([{ path: '', message: 'Expected a part document: a JSON object.' }]);
+  }
+  const { chain, ...frame } = value as Record<string, unknown>;
+  const errors: FieldError[] = [];
+  if (Object.hasOwn(value, '__proto__')) errors.push({ path: '__proto__', message: 'There is no field of this name.' });
+  const variables = frame['variables'];
+  if (typeof variables === 'object' && variables !== null && Object.hasOwn(variables, '__proto__')) {
+    errors.push({ path: 'variables/__proto__', message: 'This name can not be given to a variable.' });
+  }
+  if (errors.length > 0) return refused(errors);
+  const framed = frameSchema.safeParse(frame, { jitless: true });
+  if (!framed.success) errors.push(...worded(framed.error, []));
+  errors.push(...chainErrors(chain));
+  if (errors.length > 0) return refused(errors);
+  const document = { ...framed.data, chain } as PartDocument;
+  const doubled = doubledIds(document);
+  return doubled.length > 0 ? refused(doubled) : { ok: true, document };
+}
+
+function refused(errors: readonly FieldError[]): Refused {
+  return { ok: false, errors: errors.slice(0, MOST_ERRORS) };
+}
+
+function chainErrors(chain: unknown): FieldError[] {
+  if (!Array.isArray(chain)) return [{ path: 'chain', message: expectedAt(['chain']) }];
+  if (chain.length === 0) return [{ path: 'chain', message: 'The chain is empty: it needs one leg at least.' }];
+  if (chain.length > LONGEST_CHAIN) {
+    return [{ path: 'chain', message: `A chain has ${MOST_BENDS} bends at most (${LONGEST_CHAIN} entries).` }];
+  }
+  const errors: FieldError[] = [];
+  let bends = 0;
+  chain.forEach((entry: unknown, i) => {
+    const kind = kindOf(entry);
+    if (kind === null) {
+      errors.push({ path: `chain/${i}`, message: 'Expected a leg, a bend or a joggle.' });
+      return;
+    }
+    const parsed = KINDS[kind].safeParse(entry, { jitless: true });
+    if (!parsed.success) errors.push(...worded(parsed.error, ['chain', i]));
+    if (kind !== 'leg') bends += kind === 'bend' ? 1 : 2;
+    const wanted = i % 2 === 0;
+    if (wanted !== (kind === 'leg')) {
+      const message = wanted
+        ? 'A leg must stand here: the chain begins with a leg, and one follows every bend or joggle.'
+        : 'A bend or a joggle must stand between two legs.';
+      errors.push({ path: `chain/${i}`, message });
+    }
+  });
+  if (chain.length % 2 === 0)
+    errors.push({ path: `chain/${chain.length - 1}`, message: 'The chain must end with a leg.' });
+  if (bends > MOST_BENDS) {
+    errors.push({
+      path: 'chain',
+      message: `A chain has ${MOST_BENDS} bends at most; a joggle counts two. This one has ${bends}.`,
+    });
+  }
+  return errors;
+}
+
+const KINDS = { leg: legSchema, bend: bendSchema, joggle: joggleSchema } as const;
+
+function kindOf(entry: unknown): keyof typeof KINDS | null {
+  if (typeof entry !== 'object' || entry === null || Array.isArray(entry)) return null;
+  const kinds = (['leg', 'bend', 'joggle'] as const).filter((kind) => Object.hasOwn(entry, kind));
+  if (kinds.length === 1) return kinds[0]!;
+  // Neither or several: tell by the other fields which one was meant, so that the message fits.
+  if (kinds.length > 1) return null;
+  if (Object.hasOwn(entry, 'run')) return 'joggle';
+  if (Object.hasOwn(entry, 'radius') || Object.hasOwn(entry, 'turn')) return 'bend';
+  return Object.hasOwn(entry, 'measure') || Object.hasOwn(entry, 'name') ? 'leg' : null;
+}
+
+/** The schema's issues as sentences at their fields. */
+function worded(error: z.ZodError, base: readonly PropertyKey[]): FieldError[] {
+  return error.issues.flatMap((issue): FieldError[] => {
+    const path = [...base, ...issue.path];
+    if (issue.code === 'unrecognized_keys') {
+      return issue.keys.map((key) => ({
+        path: pathOf([...path, key]),
+        message: `There is no field "${key.slice(0, 60)}" here.`,
+      }));
+    }
+    return [{ path: pathOf(path), message: expectedAt(path) }];
+  });
+}
+
+const pathOf = (path: readonly PropertyKey[]): string => path.map(String).join('/');
+
+function doubledIds(document: PartDocument): FieldError[] {
+  const seen = new Set<string>();
+  const errors: FieldError[] = [];
+  const look = (list: readonly { readonly id?: string }[], name: string): void =>
+    list.forEach(({ id }, i) => {
+      if (id === undefined) return;
+      if (seen.has(id)) errors.push({ path: `${name}/${i}/id`, message: `The id "${id}" is given twice.` });
+      seen.add(id);
+    });
+  look(document.chain, 'chain');
+  look(document.holes ?? [], 'holes');
+  return errors;
+}

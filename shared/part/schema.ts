@@ -1,0 +1,125 @@
+/** The shape of a part document. Judged by `restore`; described to others by the API's own description. */
+import { z } from 'zod';
+import { DOCUMENT_FORMAT } from './document';
+
+const LARGEST_COUNT = 1000;
+
+/** Text for people: any characters, one line of reasonable length. */
+const label = z.string().max(200);
+const idSchema = z.string().min(1).max(100);
+
+export const expressionSchema = z.union([z.number(), z.string()]).meta({
+  description: 'A number, or an expression such as "1 1/8", "W/2 - 1/16" or "25 mm".',
+});
+
+export const turnSchema = z.enum(['up', 'down']);
+export const handSchema = z.enum(['as-drawn', 'opposite']);
+export const measureKindSchema = z.enum(['mold-line', 'outside-edge', 'inside', 'flat']);
+export const measureSchema = z.union([measureKindSchema, z.tuple([measureKindSchema, measureKindSchema])]);
+
+export const allowanceSchema = z.discriminatedUnion('method', [
+  z.strictObject({ method: z.literal('k-factor'), k: expressionSchema }),
+  z.strictObject({ method: z.literal('handbook') }),
+  z.strictObject({ method: z.literal('din-6935') }),
+  z.strictObject({ method: z.literal('rule-90'), hardness: z.enum(['soft', 'medium', 'hard']) }),
+  z.strictObject({ method: z.literal('shop'), k: expressionSchema, figure: idSchema.optional() }),
+  z.strictObject({ method: z.literal('measured'), allowance: expressionSchema }),
+]);
+
+export const noseSchema = z.strictObject({ radius: expressionSchema });
+
+export const legSchema = z.strictObject({
+  id: idSchema.optional(),
+  leg: expressionSchema,
+  name: label.optional(),
+  measure: measureSchema.optional(),
+});
+
+export const bendSchema = z.strictObject({
+  id: idSchema.optional(),
+  bend: expressionSchema,
+  turn: turnSchema,
+  radius: expressionSchema,
+  name: label.optional(),
+  allowance: allowanceSchema.optional(),
+  nose: noseSchema.optional(),
+});
+
+export const joggleSchema = z.strictObject({
+  id: idSchema.optional(),
+  joggle: expressionSchema,
+  run: expressionSchema,
+  turn: turnSchema,
+  radius: expressionSchema,
+  name: label.optional(),
+  allowance: allowanceSchema.optional(),
+  nose: noseSchema.optional(),
+});
+
+export const holeSchema = z.strictObject({
+  id: idSchema.optional(),
+  leg: z.number().int().min(0),
+  diameter: expressionSchema,
+  from: z.enum(['start', 'end', 'mold-start', 'mold-end']),
+  at: expressionSchema,
+  across: expressionSchema,
+  count: z.number().int().min(1).max(LARGEST_COUNT).optional(),
+  pitch: expressionSchema.optional(),
+  name: label.optional(),
+});
+
+export const materialSchema = z.union([
+  z.string().min(1).max(100),
+  z.strictObject({
+    name: z.string().min(1).max(100),
+    density: z.number().positive().optional(),
+    modulus: z.number().positive().optional(),
+    yield: z.number().positive().optional(),
+  }),
+]);
+
+const toleranceSchema = z.tuple([expressionSchema, expressionSchema]);
+
+export const variablesSchema = z.record(z.string(), expressionSchema);
+
+const dashNumberSchema = z.strictObject({
+  dash: z.string().min(1).max(20),
+  variables: variablesSchema.optional(),
+  hand: handSchema.optional(),
+  title: label.optional(),
+});
+
+/** Everything but the chain, whose entries are judged one by one so that each error names its own field. */
+export const frameSchema = z.strictObject({
+  format: z.literal(DOCUMENT_FORMAT),
+  unit: z.enum(['in', 'mm']),
+  thickness: expressionSchema,
+  material: materialSchema.optional(),
+  width: expressionSchema.optional(),
+  grain: z.enum(['along', 'across']).optional(),
+  allowance: allowanceSchema,
+  variables: variablesSchema.optional(),
+  holes: z.array(holeSchema).max(LARGEST_COUNT).optional(),
+  seat: z.number().int().min(0).optional(),
+  nose: noseSchema.optional(),
+  trim: z.strictObject({ start: expressionSchema.optional(), end: expressionSchema.optional() }).optional(),
+  tolerances: z
+    .strictObject({
+      length: toleranceSchema.optional(),
+      angle: toleranceSchema.optional(),
+      radius: toleranceSchema.optional(),
+      k: toleranceSchema.optional(),
+      cut: toleranceSchema.optional(),
+      thickness: toleranceSchema.optional(),
+    })
+    .optional(),
+  hand: handSchema.optional(),
+  dashNumbers: z.array(dashNumberSchema).max(200).optional(),
+});
+
+export const chainEntrySchema = z.union([legSchema, bendSchema, joggleSchema]);
+
+export const documentSchema = z.strictObject({ ...frameSchema.shape, chain: z.array(chainEntrySchema).min(1) }).meta({
+  id: 'PartDocument',
+  description: 'A part: legs, bends and joggles in order, and what is needed to lay them out.',
+});

@@ -1,0 +1,139 @@
+/** Sections that most parts begin as, from the overall sizes that people measure (outside to outside). */
+import type { ChainEntry, Unit } from './document';
+
+export interface Size {
+  readonly key: string;
+  readonly label: string;
+  readonly initial: Readonly<Record<Unit, string>>;
+}
+
+export interface StartingSection {
+  readonly id: string;
+  readonly name: string;
+  /** One sentence on what is measured how. */
+  readonly says: string;
+  readonly sizes: readonly Size[];
+  /** @param sizes figure or expression by key @param radius of every bend @returns the chain, measured to mold lines */
+  readonly make: (sizes: Readonly<Record<string, string>>, radius: string) => ChainEntry[];
+}
+
+type Turns = readonly ('up' | 'down')[];
+
+/** Square section: legs by size key with their names, and the turn between each two. */
+function square(legs: readonly (readonly [string, string])[], turns: Turns): StartingSection['make'] {
+  return (sizes, radius) =>
+    legs.flatMap(([key, name], i): ChainEntry[] => {
+      const leg: ChainEntry = { leg: figure(sizes[key] ?? ''), name };
+      const turn = turns[i];
+      return turn === undefined ? [leg] : [leg, { bend: 90, turn, radius: figure(radius) }];
+    });
+}
+
+/** Plain figures are kept as numbers, as the typed chain keeps them. */
+function figure(text: string): string | number {
+  const trimmed = text.trim();
+  return trimmed !== '' && String(Number(trimmed)) === trimmed ? Number(trimmed) : trimmed;
+}
+
+const size = (key: string, label: string, inch: string, millimetre: string): Size => ({
+  key,
+  label,
+  initial: { in: inch, mm: millimetre },
+});
+
+const HEIGHT = size('height', 'Overall height', '1', '25');
+const WIDTH = size('width', 'Overall width', '2', '50');
+
+export const STARTING_SECTIONS: readonly StartingSection[] = [
+  {
+    id: 'angle',
+    name: 'Angle',
+    says: 'Both legs outside to outside.',
+    sizes: [size('first', 'First leg', '1', '25'), size('second', 'Second leg', '1', '25')],
+    make: square(
+      [
+        ['first', 'First leg'],
+        ['second', 'Second leg'],
+      ],
+      ['up'],
+    ),
+  },
+  {
+    id: 'channel',
+    name: 'Channel',
+    says: 'Flange height and web width, outside to outside.',
+    sizes: [HEIGHT, WIDTH],
+    make: square(
+      [
+        ['height', 'Left flange'],
+        ['width', 'Web'],
+        ['height', 'Right flange'],
+      ],
+      ['up', 'up'],
+    ),
+  },
+  {
+    id: 'z',
+    name: 'Z',
+    says: 'Web height from outside to outside, each flange from its edge to the outside of the web.',
+    sizes: [size('lower', 'Lower flange', '3/4', '20'), HEIGHT, size('upper', 'Upper flange', '3/4', '20')],
+    make: square(
+      [
+        ['lower', 'Lower flange'],
+        ['height', 'Web'],
+        ['upper', 'Upper flange'],
+      ],
+      ['up', 'down'],
+    ),
+  },
+  {
+    id: 'hat',
+    name: 'Hat',
+    says: 'Height from under the feet to the top of the crown, crown outside to outside, feet from edge to the outside of the web.',
+    sizes: [size('foot', 'Each foot', '3/4', '20'), HEIGHT, size('crown', 'Crown width', '1 1/2', '40')],
+    make: square(
+      [
+        ['foot', 'Left foot'],
+        ['height', 'Left web'],
+        ['crown', 'Crown'],
+        ['height', 'Right web'],
+        ['foot', 'Right foot'],
+      ],
+      ['up', 'down', 'down', 'up'],
+    ),
+  },
+  {
+    id: 'lipped-channel',
+    name: 'Lipped channel',
+    says: 'Lips, flange height and web width, outside to outside.',
+    sizes: [size('lip', 'Each lip', '1/2', '12'), HEIGHT, WIDTH],
+    make: square(
+      [
+        ['lip', 'Left lip'],
+        ['height', 'Left flange'],
+        ['width', 'Web'],
+        ['height', 'Right flange'],
+        ['lip', 'Right lip'],
+      ],
+      ['up', 'up', 'up', 'up'],
+    ),
+  },
+  {
+    id: 'j',
+    name: 'J',
+    says: 'Tall leg, web and short return, outside to outside.',
+    sizes: [
+      size('leg', 'Tall leg', '1 1/2', '40'),
+      size('width', 'Web width', '1', '25'),
+      size('return', 'Return', '1/2', '12'),
+    ],
+    make: square(
+      [
+        ['leg', 'Tall leg'],
+        ['width', 'Web'],
+        ['return', 'Return'],
+      ],
+      ['up', 'up'],
+    ),
+  },
+];

@@ -1,0 +1,138 @@
+/** The blank deck: the strip with its bend zones and lines, laid out lengthways to scale like a tape. */
+import type { BendResult, Solved } from '@shared/result';
+import type { BendNote } from './bend-notes';
+import { bendNotes, notesRoom } from './bend-notes';
+import { sheetMarks } from './blank-sheet';
+import type { Drawing, Mark } from './marks';
+import { linePath } from './marks';
+import type { Station } from './station-labels';
+import { stationLabels, stationRoom } from './station-labels';
+
+export type BlankLines = 'tangents' | 'sight lines' | 'both';
+export const BLANK_LINES: readonly BlankLines[] = ['tangents', 'sight lines', 'both'];
+
+export interface BlankOptions {
+  /** Room there is; the drawing gets wider, never more crowded, when its figures need it. */
+  readonly width: number;
+  readonly lines: BlankLines;
+  readonly selected: number | null;
+  readonly figureOf: (length: number) => string;
+  readonly noteOf: (bend: number) => readonly [string, string, string];
+  readonly grain: 'along' | 'across' | null;
+}
+
+export interface BlankDrawing extends Drawing {
+  /** False when the width of the blank is drawn shortened, with a break. */
+  readonly widthToScale: boolean;
+}
+
+const MARGIN = 46;
+const LEAST_HEIGHT = 64;
+const MOST_HEIGHT = 132;
+
+/** A bend whose stations are all known. */
+type Placed = BendResult & { tangentStart: number; centre: number; tangentEnd: number };
+
+const isPlaced = (bend: BendResult): bend is Placed => bend.tangentStart !== null && bend.tangentEnd !== null;
+
+/** Null when the stations can't be given; the findings say why. */
+export function blankDrawing(solved: Solved, options: BlankOptions): BlankDrawing | null {
+  const length = solved.developedLength;
+  const bends = solved.bends.filter(isPlaced);
+  if (length === null || length <= 0 || bends.length < solved.bends.length || options.width < 40) return null;
+
+  const top = topStations(bends, length, options);
+  const bottom = options.lines === 'both' ? sightStations(bends, options) : [];
+  const notes = bends.map((bend, index): Omit<BendNote, 'x'> & { at: number } => ({
+    at: bend.centre,
+    parts: options.noteOf(index),
+    pick: bend.chain,
+    selected: bend.chain === options.selected,
+  }));
+  const needed = Math.max(
+    stationRoom(top) + 2 * MARGIN,
+    stationRoom(bottom) + 2 * MARGIN,
+    notesRoom(notes.map((note) => ({ ...note, x: 0 }))) + 24,
+  );
+  const width = Math.max(options.width, Math.ceil(needed));
+  const scale = (width - 2 * MARGIN) / length;
+  const x = (station: number): number => MARGIN + station * scale;
+
+  const trueHeight = (solved.blank.width ?? 0) * scale;
+  const height = Math.min(MOST_HEIGHT, Math.max(LEAST_HEIGHT, trueHeight));
+  const widthToScale = trueHeight > 0 && Math.abs(height - trueHeight) < 0.5;
+  const placed = (stations: readonly StationAt[]): Station[] => stations.map((one) => ({ ...one, x: x(one.at) }));
+
+  const above = stationLabels(placed(top), 0, -1, MARGIN, width - MARGIN);
+  const edge = above.height + 6;
+  const foot = edge + height;
+  const heads = stationLabels(placed(top), edge, -1, MARGIN, width - MARGIN);
+  const feet = bottom.length > 0 ? stationLabels(placed(bottom), foot, 1, MARGIN, width - MARGIN) : null;
+  const under = foot + (feet?.height ?? 0);
+  const band = bendNotes(
+    notes.map((note) => ({ ...note, x: x(note.at) })),
+    under,
+    8,
+    width - 8,
+  );
+  const marks: Mark[] = [
+    ...sheetMarks(solved, { x, top: edge, foot, widthToScale, ...options }),
+    ...lineMarks(bends, x, edge, foot, options),
+    ...heads.marks,
+    ...(feet?.marks ?? []),
+    ...band.marks,
+  ];
+  return { width, height: under + band.height + 4, marks, widthToScale };
+}
+
+type StationAt = Omit<Station, 'x'> & { readonly at: number };
+
+function topStations(bends: readonly Placed[], length: number, options: BlankOptions): StationAt[] {
+  const { figureOf, lines } = options;
+  const ends: StationAt[] = [
+    { at: 0, text: '0', role: 'end-station', line: 'edge' },
+    { at: length, text: figureOf(length), role: 'end-station', line: 'edge' },
+  ];
+  return [...ends, ...(lines === 'sight lines' ? sightStations(bends, options) : tangentStations(bends, options))];
+}
+
+function tangentStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
+  return bends.flatMap((bend) =>
+    [bend.tangentStart, bend.tangentEnd].map((at): StationAt => {
+      const common = { pick: bend.chain, selected: bend.chain === selected };
+      return { at, text: figureOf(at), role: 'station', line: 'tangent', ...common };
+    }),
+  );
+}
+
+function sightStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
+  return bends.flatMap((bend) =>
+    (bend.sightLine ? [bend.sightLine.startUnderNose, bend.sightLine.endUnderNose] : []).map((at): StationAt => {
+      const common = { pick: bend.chain, selected: bend.chain === selected };
+      return { at, text: figureOf(at), role: 'station', line: 'sight', ...common };
+    }),
+  );
+}
+
+/** Tangent lines are always there, faint or full; sight lines only when asked for. */
+function lineMarks(
+  bends: readonly Placed[],
+  x: (station: number) => number,
+  top: number,
+  foot: number,
+  { lines, selected }: BlankOptions,
+): Mark[] {
+  const down = (at: number): string => linePath({ x: x(at), y: top }, { x: x(at), y: foot });
+  return bends.flatMap((bend): Mark[] => {
+    const common = { pick: bend.chain, selected: bend.chain === selected };
+    const marks: Mark[] = [
+      { kind: 'path', role: 'centre', d: down(bend.centre), ...common },
+      { kind: 'path', role: 'tangent', d: down(bend.tangentStart) + down(bend.tangentEnd), ...common },
+    ];
+    if (lines !== 'tangents' && bend.sightLine) {
+      const { startUnderNose, endUnderNose } = bend.sightLine;
+      marks.push({ kind: 'path', role: 'sight', d: down(startUnderNose) + down(endUnderNose), ...common });
+    }
+    return marks;
+  });
+}

@@ -1,0 +1,43 @@
+import {
+  afterRenderEffect,
+  ChangeDetectionStrategy,
+  Component,
+  type ElementRef,
+  input,
+  output,
+  viewChild,
+  ViewEncapsulation,
+} from '@angular/core';
+import type { Drawing } from './marks';
+import { paint } from './paint';
+
+/** A drawing on the page. What it says in words is the caller's to give: as `label` here and as text beside it. */
+@Component({
+  selector: 'lw-drawing-view',
+  template: '<svg #paper role="img" class="drawing" [attr.aria-label]="label()" (click)="choose($event)"></svg>',
+  styleUrl: './drawing-view.scss',
+  // The marks are made by svg.js and carry no attribute of this component.
+  encapsulation: ViewEncapsulation.None,
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { class: 'lw-drawing', '[class.flat]': 'flat()' },
+})
+export class DrawingView {
+  readonly drawing = input.required<Drawing>();
+  readonly label = input.required<string>();
+  /** The metal is seen flat, not cut. */
+  readonly flat = input(false);
+  /** The entry of the chain that was clicked, or null beside all of them. */
+  readonly pick = output<number | null>();
+
+  private readonly paper = viewChild.required<ElementRef<SVGSVGElement>>('paper');
+
+  constructor() {
+    afterRenderEffect({ write: () => paint(this.paper().nativeElement, this.drawing()) });
+  }
+
+  protected choose(event: MouseEvent): void {
+    const marked = event.target instanceof Element ? event.target.closest('[data-pick]') : null;
+    const entry = marked?.getAttribute('data-pick') ?? null;
+    this.pick.emit(entry === null ? null : Number(entry));
+  }
+}

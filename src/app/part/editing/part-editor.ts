@@ -1,0 +1,128 @@
+import { computed, inject, Injectable, linkedSignal, signal } from '@angular/core';
+import type { Part } from '@shared/contracts/parts';
+import type { PartDocument, Unit } from '@shared/part/document';
+import type { SolveResult, Solved } from '@shared/result';
+import { solve } from '@shared/solve';
+import { convertLength } from '@shared/units/length';
+import { formatLength } from '@shared/units/format';
+import { Autosave } from '../saving/autosave';
+import type { History } from './history';
+import { begin, cancelGesture, change, endGesture, redo, undo } from './history';
+
+export type Edit = (document: PartDocument) => PartDocument;
+
+const EMPTY: PartDocument = {
+  format: 'leafwright/1',
+  unit: 'in',
+  thickness: '',
+  allowance: { method: 'handbook' },
+  chain: [],
+};
+
+/** The open part: one immutable document, everything else computed from it. */
+@Injectable()
+export class PartEditor {
+  private readonly autosave = inject(Autosave);
+  private readonly opened = signal<Part | null>(null);
+  private readonly history = signal<History<PartDocument>>(begin(EMPTY));
+  private readonly picked = signal<number | null>(null);
+  private readonly unitShown = signal<Unit | null>(null);
+
+  readonly part = this.opened.asReadonly();
+  readonly mayEdit = signal(false);
+  readonly document = computed(() => this.history().present);
+  readonly result = computed<SolveResult>(() => solve(this.document()));
+  /** The newest result with figures; while something typed is broken, that of before. */
+  readonly drawn = linkedSignal<SolveResult, Solved | null>({
+    source: this.result,
+    computation: (result, former) => (result.ok ? result : (former?.value ?? null)),
+  });
+  readonly isCurrent = computed(() => this.result().ok);
+  readonly canUndo = computed(() => this.mayEdit() && this.history().past.length > 0);
+  readonly canRedo = computed(() => this.mayEdit() && this.history().future.length > 0);
+
+  /** What is wrong, by the path of the field; what the server found last, if we did not find it first. */
+  readonly messages = computed<ReadonlyMap<string, string>>(() => {
+    const result = this.result();
+    const state = this.autosave.state();
+    const errors = !result.ok ? result.errors : state.is === 'refused' ? state.errors : [];
+    return new Map(errors.map((error) => [error.path, error.message]));
+  });
+
+  /** Entry of the chain that ledger and both decks show as selected. */
+  readonly selection = computed(() => {
+    const index = this.picked();
+    return index !== null && index < this.document().chain.length ? index : null;
+  });
+
+  /** Unit that figures are shown in; what is typed is always in the part's own. */
+  readonly shownUnit = computed<Unit>(() => this.unitShown() ?? this.document().unit);
+  readonly figureOf = computed(() => {
+    const [from, to] = [this.drawn()?.unit ?? this.document().unit, this.shownUnit()];
+    return (length: number): string => formatLength(convertLength(length, from, to), to);
+  });
+
+  open(part: Part, person: string, mayEdit: boolean): void {
+    this.opened.set(part);
+    this.mayEdit.set(mayEdit);
+    this.picked.set(null);
+    this.history.set(begin(part.revision.document));
+    this.autosave.open(part, person);
+  }
+
+  select(index: number | null): void {
+    this.picked.set(index);
+  }
+
+  showIn(unit: Unit): void {
+    this.unitShown.set(unit);
+  }
+
+  /** @param gesture changes under one name are one entry of the history until the gesture ends */
+  apply(edit: Edit, gesture: string | null = null): void {
+    if (this.mayEdit()) this.step((history) => change(history, edit(history.present), gesture));
+  }
+
+  endGesture(): void {
+    this.history.update(endGesture);
+  }
+
+  cancelGesture(): void {
+    this.step(cancelGesture);
+  }
+
+  undo(): void {
+    if (this.canUndo()) this.step(undo);
+  }
+
+  redo(): void {
+    if (this.canRedo()) this.step(redo);
+  }
+
+  /** After a clash with somebody else's save: their document in place of ours, which undo brings back. */
+  takeTheirs(): void {
+    const state = this.autosave.state();
+    if (state.is !== 'stale') return;
+    const { theirs } = state;
+    this.autosave.takeTheirs(theirs);
+    this.apply(() => theirs.document);
+  }
+
+  saveOver(): void {
+    const state = this.autosave.state();
+    if (state.is !== 'stale') return;
+    this.autosave.saveOver(state.theirs);
+    this.tell();
+  }
+
+  private step(move: (history: History<PartDocument>) => History<PartDocument>): void {
+    const before = this.document();
+    this.history.update(move);
+    if (this.document() !== before) this.tell();
+  }
+
+  private tell(): void {
+    const result = this.result();
+    this.autosave.changed(this.document(), result.ok ? 0 : result.errors.length);
+  }
+}

@@ -1,0 +1,20 @@
+import { needsReading, typedExpression } from './typed-expression';
+
+describe('a typed expression', () => {
+  it('is a figure when it reads back the same', () => {
+    expect(typedExpression('1.25')).toBe(1.25);
+    expect(typedExpression(' 2 ')).toBe(2);
+  });
+
+  it('stays text when it does not', () => {
+    for (const text of ['0.750', '1 3/16', 'W/2', 'abc', '', '1e3']) expect(typedExpression(text)).toBe(text);
+  });
+
+  it('shows what it comes to unless that is plain', () => {
+    expect(needsReading('1 3/16')).toBeTrue();
+    expect(needsReading('W')).toBeTrue();
+    expect(needsReading('0.750')).toBeFalse();
+    expect(needsReading('')).toBeFalse();
+    expect(needsReading(2)).toBeFalse();
+  });
+});

@@ -1,0 +1,15 @@
+import type { Expression } from '@shared/part/document';
+
+/**
+ * What was typed in a box, as the document keeps it: a figure when it reads back as exactly the same text, else the text
+ * ("1 3/16", "0.750", "W/2", also what can't be read), so that the box always shows what somebody typed.
+ */
+export function typedExpression(text: string): Expression {
+  const trimmed = text.trim();
+  const value = Number(trimmed);
+  return trimmed !== '' && Number.isFinite(value) && String(value) === trimmed ? value : trimmed;
+}
+
+/** Whether what it comes to is worth showing beside it. */
+export const needsReading = (expression: Expression): boolean =>
+  typeof expression === 'string' && expression !== '' && !/^\d*\.?\d+$/.test(expression);

@@ -1,0 +1,77 @@
+import { ChangeDetectionStrategy, Component, computed, ElementRef, inject } from '@angular/core';
+import { MatButtonModule } from '@angular/material/button';
+import { isBend, isJoggle, isLeg } from '@shared/part/document';
+import { commandOf } from '../editing/commands';
+import { PartEditor } from '../editing/part-editor';
+import { BendRow } from './bend-row';
+import { JoggleRow } from './joggle-row';
+import { LegRow } from './leg-row';
+
+type Row =
+  | { readonly kind: 'leg'; readonly index: number; readonly number: number }
+  | { readonly kind: 'bend' | 'joggle'; readonly index: number; readonly number: number };
+
+/** The chain as a list: leg, bend, leg, …; typed straight down with the keyboard alone. */
+@Component({
+  selector: 'lw-ledger',
+  imports: [BendRow, JoggleRow, LegRow, MatButtonModule],
+  templateUrl: './ledger.html',
+  styleUrl: './ledger.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class Ledger {
+  protected readonly editor = inject(PartEditor);
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+
+  protected readonly addAtStart = commandOf('add-at-start');
+  protected readonly addAtEnd = commandOf('add-at-end');
+
+  /** Legs are counted from 1; bends are numbered as their lines are, a joggle by the first of its two. */
+  protected readonly rows = computed((): Row[] => {
+    let legs = 0;
+    let bends = 1;
+    return this.editor.document().chain.map((entry, index): Row => {
+      if (isLeg(entry)) return { kind: 'leg', index, number: ++legs };
+      const number = bends;
+      bends += isJoggle(entry) ? 2 : 1;
+      return { kind: isBend(entry) ? 'bend' : 'joggle', index, number };
+    });
+  });
+
+  protected focusedRow(event: FocusEvent): void {
+    const row = event.target instanceof Element ? event.target.closest('[data-row]') : null;
+    if (row) this.editor.select(Number(row.getAttribute('data-row')));
+  }
+
+  /** Enter and Tab go down to the next figure, the arrows stay in their column. */
+  protected move(event: KeyboardEvent): void {
+    const target = event.target;
+    if (!(target instanceof HTMLInputElement) || event.ctrlKey || event.metaKey || event.altKey) return;
+    const column = target.getAttribute('data-cell');
+    if (column === null) return;
+    const down = event.key === 'ArrowDown';
+    if (down || event.key === 'ArrowUp') this.go(event, target, column, down ? 1 : -1);
+    else if (event.key === 'Enter') this.go(event, target, 'value', event.shiftKey ? -1 : 1);
+    else if (event.key === 'Tab' && !event.shiftKey) this.tab(event, target);
+  }
+
+  /** Within a row Tab does what it does anywhere; from its last figure it goes down, past the choices beside it. */
+  private tab(event: KeyboardEvent, from: HTMLInputElement): void {
+    const figures = from.closest('[data-row]')?.querySelectorAll('input[data-cell]');
+    if (figures && figures[figures.length - 1] === from) this.go(event, from, 'value', 1);
+  }
+
+  /** Where there is no further row the key does what it does anywhere. */
+  private go(event: Event, from: HTMLElement, column: string, step: 1 | -1): void {
+    const rows = [...this.host.nativeElement.querySelectorAll('[data-row]')];
+    const at = rows.findIndex((row) => row.contains(from));
+    for (let next = at + step; next >= 0 && next < rows.length; next += step) {
+      const cell = rows[next]?.querySelector<HTMLInputElement>(`input[data-cell="${column}"]`);
+      if (!cell) continue;
+      event.preventDefault();
+      cell.focus();
+      cell.select();
+      return;
+    }
+  }
+}
