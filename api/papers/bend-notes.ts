@@ -45,6 +45,8 @@ export function bendNoteWays(
   );
   const places = bends.map(({ station }) => view.x(station));
   const ways: BendNotes[] = [];
+  const none: BendNotes = { style: 'none', notes: [], put: [], height: 0 };
+  if (bends.length === 0) return [none];
   const notesOf = (lines: (bend: BendResult, name: string) => string[]): Note[] =>
     bends.map(({ bend, index, station }) => ({ station, lines: lines(bend, lineName(index)) }));
 
@@ -77,7 +79,7 @@ export function bendNoteWays(
     'name',
     notesOf((_, name) => [name]),
   );
-  return [...ways, { style: 'none', notes: [], put: [], height: 0 }];
+  return [...ways, none];
 }
 
 export function drawBendNotes(plan: BendNotes, view: BlankView): Mark[] {

@@ -33,7 +33,7 @@ const LEAST_ACROSS = 12;
 const NOMINAL_ACROSS = 18;
 const BROKEN_ACROSS = 52;
 /** A true drawing may be this much shorter than the room before the width is cut out instead. */
-const SHORTEST_TRUE = 0.45;
+const SHORTEST_TRUE = 0.4;
 
 /** Finds scale, place and labels of the blank in an area; null when the blank has no length. */
 export function planBlank(input: BlankPaperInput, area: Box): BlankPlan | null {
@@ -89,9 +89,12 @@ function place(
   const stations = planRunningDimensions(input.result, length, along);
   const rows = blank.trim.start + blank.trim.end > 0 ? 2 : 1;
   const ways = bendNoteWays(input.result, along).map((notes) => {
-    const sentences = blankSentences(input, across, stations.shown, notes.style).flatMap((sentence) =>
-      wrap(sentence, area.width, TYPE.small),
+    const sentences = wrap(
+      blankSentences(input, across, stations.shown, notes.style).join(' '),
+      area.width,
+      TYPE.small,
     );
+
     const taken =
       HEADING + stations.height + notes.height + rows * DIMENSION_ROW + 2 + sentences.length * SENTENCE_LINE;
     return { notes, sentences, left: area.height - taken };

@@ -31,8 +31,10 @@ export function blankSentences(input: BlankPaperInput, across: Across, shown: Sh
     );
   }
   if (document.hand === 'opposite') said.push('Opposite hand of the part as typed.');
-  if (bends.length > 0)
-    said.push('Lines near each other run together at this scale: mark by the stations, do not scale the drawing.');
-  else said.push('Do not scale the drawing.');
+  said.push(
+    bends.length > 0
+      ? 'Mark by the stations: lines near each other run together at this scale.'
+      : 'Work by the figures: do not scale the drawing.',
+  );
   return said;
 }

@@ -2,7 +2,7 @@ import { TYPE } from './paper-size';
 import { THIN } from './pens';
 import { line } from './sheet';
 import type { Mark, Point, ShapeMark } from './sheet';
-import { text, widthOf } from './lettering';
+import { extentOf, text, widthOf } from './lettering';
 
 const LENGTH = 2.6;
 const HALF_WIDTH = 0.45;
@@ -47,7 +47,14 @@ export function dimensionAlong({ from, to, edge, at, words, size = TYPE.station 
   const place = inside
     ? ({ x: (from + to) / 2, align: 'centre' } as const)
     : ({ x: to + reach + 1, align: 'left' } as const);
-  marks.push(text(words, place.x, at - 0.8, { size, weight: 'semibold', align: place.align, clear: true }));
+  marks.push(
+    text(words, place.x, at - 0.8 - extentOf(words, size, 'semibold').below, {
+      size,
+      weight: 'semibold',
+      align: place.align,
+      clear: true,
+    }),
+  );
   return marks;
 }
 
@@ -63,7 +70,13 @@ export function dimensionAcross({ from, to, edge, at, words, size = TYPE.station
   // Too short for its figure upright along the line: beside it, read level.
   marks.push(
     inside
-      ? text(words, at - 0.8, (from + to) / 2, { size, weight: 'semibold', align: 'centre', upward: true, clear: true })
+      ? text(words, at - 0.8 - extentOf(words, size, 'semibold').below, (from + to) / 2, {
+          size,
+          weight: 'semibold',
+          align: 'centre',
+          upward: true,
+          clear: true,
+        })
       : text(words, at + 1.5, (from + to) / 2 + size * 0.35, { size, weight: 'semibold', clear: true }),
   );
   return marks;

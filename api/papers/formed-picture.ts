@@ -71,5 +71,5 @@ function captionLines(result: Solved): string[] {
   if (!envelope) return ['Envelope: no figure'];
   const { unit } = result;
   const size = `${lengthFigure(envelope.width, unit)} × ${lengthFigure(envelope.height, unit)} ${unit}`;
-  return [`Envelope ${size}, leg ${envelope.seat + 1} level · not to scale`];
+  return [`Envelope ${size}`, `leg ${envelope.seat + 1} level · not to scale`];
 }

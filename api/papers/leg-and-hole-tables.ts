@@ -30,7 +30,7 @@ export function drawLegs(flow: SheetFlow, { legs, unit }: Solved): void {
     { lines: [measureWords(leg.measure)] },
     { lines: [lengthFigure(leg.setback[0], unit)] },
     { lines: [lengthFigure(leg.setback[1], unit)] },
-    { lines: [lengthFigure(leg.flat, unit)], weight: 'semibold' as const },
+    { lines: [lengthFigure(leg.flat > 0 ? leg.flat : null, unit)], weight: 'semibold' as const },
     { lines: [lengthFigure(leg.start, unit)] },
     { lines: [lengthFigure(leg.end, unit)] },
   ]);
@@ -50,7 +50,7 @@ export function drawHoles(flow: SheetFlow, { holes, legs, unit }: Solved, docume
   if (holes.length === 0) return;
   const widths = columnWidths(HOLES, flow.area.width);
   const rows = holes.map(({ hole, leg, station, across, diameter }, index) => [
-    { lines: [String(index + 1)], weight: 'semibold' as const },
+    { lines: [holeNumber(holes, index)], weight: 'semibold' as const },
     { lines: [shorten(document.holes?.[hole]?.name ?? '', cellRoom(widths[1] ?? 0), TYPE.body)] },
     { lines: [shorten(legName(legs[leg]?.name ?? null, leg), cellRoom(widths[2] ?? 0), TYPE.body)] },
     { lines: [lengthFigure(diameter, unit)] },
@@ -58,4 +58,12 @@ export function drawHoles(flow: SheetFlow, { holes, legs, unit }: Solved, docume
     stationCell(across, unit),
   ]);
   drawTable(flow, 'Holes', HOLES, rows);
+}
+
+/** A hole by its number in the document, as the findings name it; the holes of a row are counted behind a point. */
+export function holeNumber(holes: Solved['holes'], index: number): string {
+  const hole = holes[index]?.hole ?? 0;
+  const row = holes.filter((other) => other.hole === hole);
+  const place = holes.slice(0, index + 1).filter((other) => other.hole === hole).length;
+  return row.length > 1 ? `${hole + 1}.${place}` : String(hole + 1);
 }

@@ -8,7 +8,9 @@ import { QUIET } from './pens';
 import type { Box, TextMark } from './sheet';
 
 const SIZE = TYPE.body;
+/** Where a label is tried, of the leg's depth and of the room to its sides: holes may be in its way. */
 const HEIGHTS = [0.5, 0.3, 0.7, 0.18, 0.82];
+const SIDES = [0, -0.6, 0.6];
 
 export const touches = (a: Box, b: Box): boolean =>
   a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
@@ -40,21 +42,28 @@ function candidates(name: string, flat: string, room: Box): TextMark[][] {
   const full = `${name} ${flat}`;
   const how = { size: SIZE, shade: QUIET, align: 'centre', clear: true } as const;
   const middle = room.x + room.width / 2;
-  const found: TextMark[][] = [];
-  for (const height of HEIGHTS) {
-    const y = room.y + room.height * height;
-    if (widthOf(full, SIZE) <= room.width && room.height >= SIZE * 1.4)
-      found.push([text(full, middle, y + SIZE * 0.35, how)]);
-    else if (widthOf(flat, SIZE) <= room.width && room.height >= SIZE * 4 && room.width >= 12) {
-      const short = shorten(name, room.width, SIZE);
-      found.push([text(short, middle, y - SIZE * 0.25, how), text(flat, middle, y + SIZE * 0.95, how)]);
-    }
-  }
-  if (room.width >= SIZE * 1.1) {
-    const words = [full, `${shorten(name, room.height - widthOf(` ${flat}`, SIZE), SIZE)} ${flat}`, flat].find(
-      (candidate) => widthOf(candidate, SIZE) <= room.height,
-    );
-    if (words) found.push([text(words, middle + SIZE * 0.35, room.y + room.height / 2, { ...how, upward: true })]);
-  }
-  return found;
+  const rows = (lines: readonly string[]): TextMark[][] =>
+    room.height < SIZE * 1.4 * lines.length || lines.some((words) => widthOf(words, SIZE) > room.width)
+      ? []
+      : HEIGHTS.flatMap((height) => {
+          const first = room.y + room.height * height + SIZE * (0.35 - 0.6 * (lines.length - 1));
+          const slack = (room.width - Math.max(...lines.map((words) => widthOf(words, SIZE)))) / 2;
+          return SIDES.map((side) =>
+            lines.map((words, row) => text(words, middle + side * slack, first + row * SIZE * 1.2, how)),
+          );
+        });
+  const upward = (words: string): TextMark[][] =>
+    room.width < SIZE * 1.1 || widthOf(words, SIZE) > room.height
+      ? []
+      : [[text(words, middle + SIZE * 0.35, room.y + room.height / 2, { ...how, upward: true })]];
+  const beside = room.height - widthOf(` ${flat}`, SIZE);
+  return [
+    ...rows([full]),
+    ...rows([name, flat]),
+    ...upward(full),
+    ...(room.width >= 14 ? rows([shorten(name, room.width, SIZE), flat]) : []),
+    ...(beside >= 10 ? upward(`${shorten(name, beside, SIZE)} ${flat}`) : []),
+    ...rows([flat]),
+    ...upward(flat),
+  ].filter((marks) => marks.every(({ box }) => box.y >= room.y && box.y + box.height <= room.y + room.height));
 }

@@ -4,16 +4,17 @@ import { formatAngle, formatLength } from '../../shared/units/format';
 import { exactFigure, lengthFigure, stationFigures } from './figures';
 import { wrap } from './lettering';
 import { TYPE } from './paper-size';
-import { METHOD_NAMES, faceUp, lineName } from './part-words';
+import { METHOD_NAMES, bendName, faceUp, lineName } from './part-words';
 import type { SheetFlow } from './sheet-flow';
 import { cellRoom, columnWidths, drawTable } from './table';
 import type { Cell, Column } from './table';
 
-const STATION = 25.5;
+/** Room for 120 63/64 with its miss. */
+const STATION = 25;
 
 const COLUMNS: readonly Column[] = [
   { head: ['line'], width: 10 },
-  { head: ['name in', 'the chain'], width: 'rest' },
+  { head: ['name', 'in the chain'], width: 'rest' },
   { head: ['turn,', 'face up'], width: 18 },
   { head: ['angle'], width: 25 },
   { head: ['inside', 'radius'], width: 16, align: 'right' },
@@ -38,10 +39,10 @@ export function drawLineSchedule(flow: SheetFlow, result: Solved): void {
   drawTable(flow, `Line schedule: stations from the net datum edge, ${ways}`, COLUMNS, rows);
 }
 
-function rowOf(bend: BendResult, index: number, { unit, joggles }: Solved, room: number): Cell[] {
-  const joggle = bend.joggle === null ? undefined : joggles[bend.joggle];
-  const name = bend.name ?? (joggle ? `joggle ${(bend.joggle ?? 0) + 1}` : '');
+function rowOf(bend: BendResult, index: number, result: Solved, room: number): Cell[] {
+  const name = bendName(bend, result);
   const { sightLine } = bend;
+  const { unit } = result;
   return [
     { lines: [lineName(index)], weight: 'semibold' },
     { lines: wrap(name, room, TYPE.body, 3), even: true },

@@ -6,6 +6,20 @@ export const lineName = (index: number): string => `L${index + 1}`;
 
 export const legName = (name: string | null, index: number): string => name ?? `Leg ${index + 1}`;
 
+/** A bend's own name, else what it lies between. */
+export function bendName(bend: BendResult, { legs, bends, joggles }: Solved): string {
+  if (bend.name !== null) return bend.name;
+  if (bend.joggle !== null) {
+    const first = bends.findIndex(({ joggle }) => joggle === bend.joggle);
+    const which = bends[first] === bend ? 'first bend' : 'second bend';
+    return joggles.length > 1 ? `joggle ${bend.joggle + 1}, ${which}` : `joggle, ${which}`;
+  }
+  const before = legs.findIndex(({ chain }) => chain === bend.chain - 1);
+  const after = legs.findIndex(({ chain }) => chain === bend.chain + 1);
+  if (before < 0 || after < 0) return '';
+  return `${legName(legs[before]?.name ?? null, before)} to ${legName(legs[after]?.name ?? null, after)}`;
+}
+
 /** The face of the blank that looks up when the bend is made on a leaf that swings up. */
 export const faceUp = (bend: BendResult): string => (bend.turn === 'up' ? 'face A up' : 'face B up');
 

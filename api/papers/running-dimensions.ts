@@ -30,6 +30,8 @@ export interface RunningDimensions {
 
 const ARROW_ROOM = 3.4;
 const JOG = 5.5;
+/** Paper between two upward figures, wide when there is room for it. */
+const GAPS = [1.7, 1.1, 0.75];
 const FARTHEST = 14;
 
 function labelsOf(result: Solved, length: number, shown: Shown): Label[] {
@@ -66,7 +68,9 @@ export function planRunningDimensions(
       return { shown, upward: false, labels, put: level, height: dimensionGap + JOG + 2 + TYPE.station };
     }
     const capital = TYPE.station * CAPITAL;
-    const upward = spread(places, capital + 0.75, view.low + capital, view.high - capital);
+    const upward = GAPS.map((gap) => spread(places, capital + gap, view.low + capital, view.high - capital)).find(
+      (put) => put !== null,
+    );
     if (upward)
       return { shown, upward: true, labels, put: upward, height: dimensionGap + JOG + 2 + Math.max(...widths) };
   }

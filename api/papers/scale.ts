@@ -7,13 +7,14 @@ export interface Scale {
 }
 
 const ENLARGED = [10, 5, 2];
-const STEPS = [1, 2, 2.5, 5];
+/** Steps of a decade: the usual metric reductions, and the quarter and eighth that inch shops draw at. */
+const STEPS = [1, 2, 2.5, 4, 5, 8];
 
 const enlarged = (times: number): Scale => ({ factor: times, text: `${times}:1` });
 const reduced = (times: number): Scale => ({ factor: 1 / times, text: `1:${times}` });
 
 /**
- * The largest standard scale (10:1 … 1:1, 1:2, 1:2.5, 1:5, 1:10 …) at which a length fits into a room.
+ * The largest standard scale (10:1 … 1:1, 1:2, 1:2.5, 1:4, 1:5, 1:8, 1:10 …) at which a length fits into a room.
  *
  * @param actual length of the part, mm, more than 0 @param room length on paper, mm
  */

@@ -7,8 +7,8 @@ import { FRAME, QUIET, RULE } from './pens';
 import { line, rectangle } from './sheet';
 import type { Box, Mark, Weight } from './sheet';
 
-export const TITLE_BLOCK_HEIGHT = 30;
-export const TITLE_STRIP_HEIGHT = 10;
+export const TITLE_BLOCK_HEIGHT = 27;
+export const TITLE_STRIP_HEIGHT = 9;
 
 interface Field {
   readonly caption: string;
@@ -100,7 +100,7 @@ function row(fields: readonly Field[], box: Box): Mark[] {
     const at = x + 1.5;
     x += width;
     const marks: Mark[] = [
-      text(shorten(field.caption, room, TYPE.caption), at, box.y + 2.6, { size: TYPE.caption, shade: QUIET }),
+      text(shorten(field.caption, room, TYPE.caption), at, box.y + 2.4, { size: TYPE.caption, shade: QUIET }),
       ...value(field, room, at, box),
     ];
     if (index > 0) marks.push(line(x - width, box.y, x - width, box.y + box.height, RULE));
@@ -109,12 +109,12 @@ function row(fields: readonly Field[], box: Box): Mark[] {
   });
 }
 
-/** One line of the field's own size when it fits, else two smaller ones, the second cut with an ellipsis. */
+/** One line of the field's own size when it fits, else one or two smaller ones, the second cut with an ellipsis. */
 function value({ words, size = 3.2, weight = 'regular' }: Field, room: number, x: number, box: Box): Mark[] {
-  const single = wrap(words, room, size, Infinity, weight);
-  if (single.length <= 1) return single.map((part) => text(part, x, box.y + 7.6, { size, weight }));
+  const base = box.y + 7.1;
+  if (wrap(words, room, size, Infinity, weight).length <= 1) return [text(words, x, base, { size, weight })];
   const small = TYPE.small;
-  return wrap(words, room, small, 2, weight).map((part, index) =>
-    text(part, x, box.y + 5.8 + index * small * 1.22, { size: small, weight }),
-  );
+  const lines = wrap(words, room, small, 2, weight);
+  const first = lines.length === 1 ? base : box.y + 5.2;
+  return lines.map((part, index) => text(part, x, first + index * small * 1.16, { size: small, weight }));
 }

@@ -33,6 +33,9 @@ export function face(weight: Weight, coverage: Coverage): Face {
   if (known) return known;
   const bytes = new Uint8Array(readFileSync(join(PACKAGE_ROOT, 'public-fonts', `IBMPlexSans-${name}.ttf`)));
   const made: Face = { name, bytes, font: fontkit.create(bytes) };
+  // A glyph keeps the character it was first asked for by. Asked for as a part of another (the points of a colon) it
+  // would keep none, and every full stop would be missing where the paper's text is searched or copied.
+  for (const code of made.font.characterSet) made.font.glyphForCodePoint(code);
   parsed.set(name, made);
   return made;
 }
