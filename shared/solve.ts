@@ -13,26 +13,26 @@ import { restore } from './part/restore';
 import type { Blank, Formed, HoleResult, Refused, SolveResult } from './result';
 import { massOf } from './section/mass';
 import { sectionOf } from './section/section';
+import { restoreShop } from './shop/context';
 
 /** Rises with every change that can move a figure; kept beside each stored result. */
 export const ENGINE_VERSION = '0.1.0';
-
-/** What a shop knows and a part does not. Nothing reads it yet; every door takes it. */
-export type ShopContext = Readonly<Record<string, unknown>>;
 
 /**
  * Lays out, forms and checks one part.
  *
  * @param document a part document of any origin (see part/document)
- * @param _shop the shop context: brake, stock, limits and the like
+ * @param shop the shop context: the shop's choices and limits (shop/context); left out, the defaults hold
  * @returns every figure (lengths in the part's unit, angles in degrees) with its findings; or `ok: false` with the path of
  *   each field that is wrong. A stop leaves `ok` true: figures that rest on a broken one are null. Never throws on bad input.
  * @source see each step's own file
  * @example solve({ format: 'leafwright/1', unit: 'in', thickness: 0.04, allowance: { method: 'handbook' }, chain: [{ leg: 1 }] }).ok // true
  */
-export function solve(document: unknown, _shop: ShopContext = {}): SolveResult {
+export function solve(document: unknown, shop?: unknown): SolveResult {
   const restored = restore(document);
+  const context = restoreShop(shop);
   if (!restored.ok) return restored;
+  if (!context.ok) return context;
   const evaluated = evaluateDocument(restored.document);
   if (!evaluated.ok) return evaluated;
   const { figures } = evaluated;
@@ -52,7 +52,7 @@ export function solve(document: unknown, _shop: ShopContext = {}): SolveResult {
     formed: solids === null ? null : formedOf(solids, figures, layout),
     section: solids === null || crossings.length > 0 ? null : sectionOf(solids, figures.thickness),
     holes,
-    findings: runChecks({ figures, layout, crossings }),
+    findings: runChecks({ figures, layout, crossings, holes, rules: context.rules }),
   };
   return isFinite(result) ? result : OVERFLOW;
 }
@@ -73,7 +73,9 @@ function blankOf(figures: PartFigures, layout: Layout, holes: readonly HoleResul
   const { developedLength: length } = layout;
   const { width, trim, material, thickness, unit } = figures;
   const drilled = holes.reduce((sum, hole) => sum + (Math.PI / 4) * hole.diameter ** 2, 0);
-  const area = length === null || width === null ? null : length * width - drilled;
+  const net = length === null || width === null ? null : length * width - drilled;
+  // More holes than blank: no figure is better than a negative one.
+  const area = net === null || net <= 0 ? null : net;
   const density = material?.density;
   return {
     length,

@@ -1,10 +1,10 @@
 import type { Hardness } from '../part/document';
 
 /** Multiples of T in the 90° length, by the hardness of the metal. */
-const BY_HARDNESS: Readonly<Record<Hardness, number>> = { soft: 0.55, medium: 0.64, hard: 0.71 };
+export const RULE_90_THICKNESS: Readonly<Record<Hardness, number>> = { soft: 0.55, medium: 0.64, hard: 0.71 };
 
 /** Multiple of R in the 90° length, as printed (π/2 to two places). */
-const RADIUS = 1.57;
+export const RULE_90_RADIUS = 1.57;
 
 /**
  * Bend allowance by the 90° rules: `(c·T + 1.57·R) · A/90`, c = 0.55 soft, 0.64 medium, 0.71 hard.
@@ -16,5 +16,5 @@ const RADIUS = 1.57;
  * @example rule90Allowance(90, 0.125, 0.063, 'medium') // 0.23657
  */
 export function rule90Allowance(angle: number, radius: number, thickness: number, hardness: Hardness): number {
-  return ((BY_HARDNESS[hardness] * thickness + RADIUS * radius) * angle) / 90;
+  return ((RULE_90_THICKNESS[hardness] * thickness + RULE_90_RADIUS * radius) * angle) / 90;
 }

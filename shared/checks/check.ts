@@ -1,13 +1,16 @@
 /** What every check is given, and how it answers. */
 import type { Layout } from '../layout/lay-out';
 import type { PartFigures } from '../part/figures';
-import type { Finding } from '../result';
+import type { Finding, HoleResult } from '../result';
+import type { ShopRules } from '../shop/context';
 
 export interface CheckInput {
   readonly figures: PartFigures;
   readonly layout: Layout;
   /** Pairs of chain indices where the formed part meets itself; empty when it could not be formed. */
   readonly crossings: readonly (readonly [number, number])[];
+  readonly holes: readonly HoleResult[];
+  readonly rules: ShopRules;
 }
 
 export type Check = (input: CheckInput) => readonly Finding[];

@@ -5,14 +5,26 @@ import { joggleRunTooShort } from './joggle-run-too-short';
 import { kAboveHalf } from './k-above-half';
 import { legConsumed } from './leg-consumed';
 import { legsCross } from './legs-cross';
+import { holeEdgeDistance } from './hole-edge-distance';
+import { holeNearBend } from './hole-near-bend';
+import { joggleRunSteep } from './joggle-run-steep';
+import { moldPointFar } from './mold-point-far';
+import { noseRadiusMismatch } from './nose-radius-mismatch';
+import { radiusBelowMinimum } from './radius-below-minimum';
 import { materialUnknown } from './material-unknown';
 
 const CHECKS: readonly Check[] = [
   legConsumed,
   joggleRunTooShort,
   legsCross,
-  kAboveHalf,
+  radiusBelowMinimum,
   grainAlongBend,
+  kAboveHalf,
+  holeEdgeDistance,
+  holeNearBend,
+  joggleRunSteep,
+  noseRadiusMismatch,
+  moldPointFar,
   materialUnknown,
 ];
 

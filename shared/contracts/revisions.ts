@@ -14,7 +14,7 @@ export const revisionSchema = z.object({
   state: z.enum(['draft']),
   /** Rises by one with every save; a save names the version it started from. */
   version: z.number().int(),
-  document: z.custom<PartDocument>(),
+  document: z.custom<PartDocument>().meta({ documents: 'PartDocument' }),
   /** As the server computed it when the document was saved. */
   result: z.custom<Solved>(),
   engineVersion: z.string(),

@@ -24,7 +24,7 @@ interface Body {
  * @source geometry: exact distances between lines and arcs, and containment
  */
 export function crossingsOf(solids: readonly Solid[], thickness: number): readonly (readonly [number, number])[] {
-  const bodies = solids.map((solid, index): Body => {
+  const bodies = solids.filter(hasSubstance).map((solid, index): Body => {
     const boundary = boundaryOf(solid, thickness);
     return { index, solid, boundary, box: extent(boundary) };
   });
@@ -46,9 +46,15 @@ export function crossingsOf(solids: readonly Solid[], thickness: number): readon
   return found.filter((pair, i) => i === 0 || pair[0] !== found[i - 1]![0] || pair[1] !== found[i - 1]![1]);
 }
 
-/** Next to each other, or the two straights of one bend below 180°, which lean away from each other and at most share its corner. */
+/** A joggle at its shortest run has no straight between its bends, which then are neighbours. */
+const hasSubstance = (solid: Solid): boolean => solid.kind === 'sector' || solid.length > 0;
+
+/**
+ * Next to each other; or the pieces of one joggle, whose bends lie on either side of the tangent between them; or the two
+ * straights of one bend below 180°, which lean away from each other and at most share its corner.
+ */
 function areNeighbours(a: Body, b: Body, bodies: readonly Body[]): boolean {
-  if (b.index - a.index <= 1) return true;
+  if (b.index - a.index <= 1 || a.solid.chain === b.solid.chain) return true;
   const between = bodies[a.index + 1]!.solid;
   return b.index - a.index === 2 && between.kind === 'sector' && !isReturnBend(Math.abs(between.sweep));
 }

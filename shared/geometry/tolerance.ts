@@ -22,6 +22,16 @@ export function exceeds(value: number, limit: number): boolean {
   return value > limit + LIMIT * Math.max(1, Math.abs(limit));
 }
 
+/** Below a limit by more than rounding. @example fallsShort(3 * 0.04, 0.12) // false */
+export function fallsShort(value: number, limit: number): boolean {
+  return value < limit - LIMIT * Math.max(1, Math.abs(limit));
+}
+
+/** What figures of this size leave when they cancel. @example isRounding(0.9 - 0.6 - 0.3, 0.9) // true */
+export function isRounding(rest: number, size: number): boolean {
+  return Math.abs(rest) <= LIMIT * Math.abs(size);
+}
+
 /** Two directions in degrees, either way round. @example areParallel(90, 270) // true */
 export function areParallel(a: number, b: number): boolean {
   const turn = (((a - b) % 180) + 180) % 180;

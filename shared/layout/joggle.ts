@@ -1,5 +1,8 @@
 const DEGREE = Math.PI / 180;
 
+/** Relative: the last bits of a sum of three squares. */
+const ROUNDING = 4 * Number.EPSILON;
+
 export type JoggleShape =
   | { readonly ok: true; readonly angle: number; readonly straight: number }
   | { readonly ok: false; readonly shortestRun: number };
@@ -20,8 +23,10 @@ export function joggle(depth: number, run: number, radius: number, thickness: nu
   const rho = 2 * radius + thickness;
   const shortestRun = depth <= rho ? Math.sqrt(2 * rho * depth - depth * depth) : rho;
   const squared = run * run + depth * depth - 2 * rho * depth;
-  if (squared < 0) return { ok: false, shortestRun };
-  const straight = Math.sqrt(squared);
+  // At the shortest run itself the two sides are equal, and rounding alone decides the sign of what is left.
+  const slack = ROUNDING * (run * run + depth * depth + 2 * rho * depth);
+  if (squared < -slack) return { ok: false, shortestRun };
+  const straight = squared <= slack ? 0 : Math.sqrt(squared);
   // acos(ρ/h) as atan2(s, ρ), which keeps its digits where ρ/h is near 1.
   const angle = Math.atan2(run, rho - depth) - Math.atan2(straight, rho);
   if (angle > Math.PI / 2 + 1e-12) return { ok: false, shortestRun };

@@ -1,5 +1,6 @@
 /** The flat layout: setbacks, flats, allowances, and every station along the blank from the free end of leg 0. */
 import { bendAllowance } from '../allowance/allowance';
+import { isRounding } from '../geometry/tolerance';
 import type { FigureLeg, Joint, PartFigures } from '../part/figures';
 import type { Measure, Turn } from '../part/document';
 import type { BendResult, JoggleResult, LegResult } from '../result';
@@ -107,7 +108,8 @@ function layLeg(
     endSetback(measure[0], before, thickness),
     endSetback(measure[1], after, thickness),
   ];
-  const flat = leg.dimension - setbacks[0] - setbacks[1];
+  const rest = leg.dimension - setbacks[0] - setbacks[1];
+  const flat = isRounding(rest, leg.dimension) ? 0 : rest;
   const whole = start !== null && flat > 0;
   return {
     name: leg.name,

@@ -64,10 +64,16 @@ export function evaluateDocument(document: PartDocument): Evaluation {
       legs,
       joints: document.hand === 'opposite' ? joints.map(turnedOver) : joints,
       holes,
+      noses: chosenNoses(document),
       seat,
       trim,
     },
   };
+}
+
+function chosenNoses(document: PartDocument): ReadonlySet<number> {
+  const chosen = document.chain.map((entry) => !isLeg(entry) && (entry.nose ?? document.nose) !== undefined);
+  return new Set(chosen.flatMap((is, i) => (is ? [i] : [])));
 }
 
 /** The opposite hand is the mirror image in the plane of the sheet: every turn goes the other way, stations and holes stay. */
@@ -144,8 +150,10 @@ function readNose(reader: FieldReader, nose: Nose | undefined, path: string): nu
 function refuseMeasuresAtReturnBends(reader: FieldReader, legs: readonly FigureLeg[], joints: readonly Joint[]): void {
   const refuse = (leg: FigureLeg | undefined, measure: Measure | undefined): void => {
     if (leg === undefined || (measure !== 'mold-line' && measure !== 'inside')) return;
+    const path = `chain/${leg.chain}/measure`;
+    if (reader.errors.some((error) => error.path === path)) return;
     reader.fail(
-      `chain/${leg.chain}/measure`,
+      path,
       `A 180° bend has no mold point to measure to: measure this leg by calipers ("outside-edge") or "flat" there.`,
     );
   };

@@ -68,6 +68,8 @@ export interface PartFigures {
   /** One fewer than legs: joint i stands between leg i and leg i + 1. */
   readonly joints: readonly Joint[];
   readonly holes: readonly FigureHole[];
+  /** Chain indices of the bends for which a nose was chosen, their own or the part's. */
+  readonly noses: ReadonlySet<number>;
   readonly seat: number | null;
   readonly trim: { readonly start: number; readonly end: number };
 }

@@ -1,5 +1,5 @@
 /** The one gate for documents from outside: storage, files, requests, the clipboard. */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { FieldError, Refused } from '../result';
 import type { PartDocument } from './document';
 import { expectedAt } from './expected';
@@ -26,9 +26,10 @@ export function restore(value: unknown): Restored {
   const { chain, ...frame } = value as Record<string, unknown>;
   const errors: FieldError[] = [];
   if (Object.hasOwn(value, '__proto__')) errors.push({ path: '__proto__', message: 'There is no field of this name.' });
-  const variables = frame['variables'];
-  if (typeof variables === 'object' && variables !== null && Object.hasOwn(variables, '__proto__')) {
-    errors.push({ path: 'variables/__proto__', message: 'This name can not be given to a variable.' });
+  const dashNumbers = frame['dashNumbers'];
+  errors.push(...prototypeVariable('', frame));
+  if (Array.isArray(dashNumbers)) {
+    errors.push(...dashNumbers.flatMap((dash, i) => prototypeVariable(`dashNumbers/${i}/`, dash)));
   }
   if (errors.length > 0) return refused(errors);
   const framed = frameSchema.safeParse(frame, { jitless: true });
@@ -38,6 +39,14 @@ export function restore(value: unknown): Restored {
   const document = { ...framed.data, chain } as PartDocument;
   const doubled = doubledIds(document);
   return doubled.length > 0 ? refused(doubled) : { ok: true, document };
+}
+
+/** The schema's reading of a record drops this name without a word, so it is refused before. */
+function prototypeVariable(path: string, holder: unknown): FieldError[] {
+  const variables =
+    typeof holder === 'object' && holder !== null ? (holder as { variables?: unknown }).variables : null;
+  if (typeof variables !== 'object' || variables === null || !Object.hasOwn(variables, '__proto__')) return [];
+  return [{ path: `${path}variables/__proto__`, message: 'This name can not be given to a variable.' }];
 }
 
 function refused(errors: readonly FieldError[]): Refused {
@@ -52,7 +61,8 @@ function chainErrors(chain: unknown): FieldError[] {
   }
   const errors: FieldError[] = [];
   let bends = 0;
-  chain.forEach((entry: unknown, i) => {
+  // Not chain.forEach: a list with gaps is no chain, and forEach would step over them.
+  Array.from<unknown>(chain).forEach((entry, i) => {
     const kind = kindOf(entry);
     if (kind === null) {
       errors.push({ path: `chain/${i}`, message: 'Expected a leg, a bend or a joggle.' });

@@ -5,6 +5,8 @@ export interface Size {
   readonly key: string;
   readonly label: string;
   readonly initial: Readonly<Record<Unit, string>>;
+  /** Degrees; everything else is a length. */
+  readonly angle?: true;
 }
 
 export interface StartingSection {
@@ -135,5 +137,58 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
       ],
       ['up', 'up'],
     ),
+  },
+  {
+    id: 'sloped-hat',
+    name: 'Hat with sloped webs',
+    says: 'Height from under the feet to the top of the crown; crown and feet to the sharp outside corners; webs at the angle that they are bent up from the feet.',
+    sizes: [
+      size('foot', 'Each foot', '3/4', '20'),
+      HEIGHT,
+      size('crown', 'Crown width', '1', '25'),
+      { key: 'angle', label: 'Bend angle', initial: { in: '60', mm: '60' }, angle: true },
+    ],
+    make: (sizes, radius) => {
+      const web = `(${sizes['height'] ?? ''}) / sin(${sizes['angle'] ?? ''})`;
+      const bend = (turn: 'up' | 'down'): ChainEntry => ({
+        bend: figure(sizes['angle'] ?? ''),
+        turn,
+        radius: figure(radius),
+      });
+      const foot = figure(sizes['foot'] ?? '');
+      return [
+        { leg: foot, name: 'Left foot' },
+        bend('up'),
+        { leg: web, name: 'Left web' },
+        bend('down'),
+        { leg: figure(sizes['crown'] ?? ''), name: 'Crown' },
+        bend('down'),
+        { leg: web, name: 'Right web' },
+        bend('up'),
+        { leg: foot, name: 'Right foot' },
+      ];
+    },
+  },
+  {
+    id: 'stepped-angle',
+    name: 'Angle with a stepped leg',
+    says: 'Both legs outside to outside, the second over its step; the land is the flat end past the step.',
+    sizes: [
+      size('first', 'First leg', '1', '25'),
+      size('second', 'Second leg', '2', '50'),
+      size('land', 'Land past the step', '3/4', '20'),
+      size('depth', 'Depth of the step', '.040', '1'),
+      size('run', 'Run of the step', '1/4', '6'),
+    ],
+    make: (sizes, radius) => {
+      const [second, land, run] = ['second', 'land', 'run'].map((key) => sizes[key] ?? '');
+      return [
+        { leg: figure(sizes['first'] ?? ''), name: 'First leg' },
+        { bend: 90, turn: 'up', radius: figure(radius) },
+        { leg: `(${second}) - (${run}) - (${land})`, name: 'Second leg' },
+        { joggle: figure(sizes['depth'] ?? ''), run: figure(run ?? ''), turn: 'up', radius: figure(radius) },
+        { leg: figure(land ?? ''), name: 'Land' },
+      ];
+    },
   },
 ];

@@ -173,13 +173,16 @@ export function printTypedChain(chain: readonly ChainEntry[]): string {
   let radius: Expression | null = null;
   const words = chain.flatMap((entry): string[] => {
     if (isLeg(entry)) return [print(entry.leg), ...measureWords(entry)];
-    const own = entry.radius === radius ? [] : [`r${print(entry.radius, true)}`];
+    const own = entry.radius === radius ? [] : [radiusWord(print(entry.radius, true))];
     radius = entry.radius;
     if (isBend(entry)) return [entry.turn, print(entry.bend, true), ...own];
     return ['joggle', print(entry.joggle), 'run', print(entry.run), entry.turn, ...own];
   });
   return words.join(' ');
 }
+
+/** `r1/8` and `r(1 1/8)` are one word; a name or a sign after the r would read as another name. */
+const radiusWord = (figure: string): string => (/^[\d.(]/.test(figure) ? `r${figure}` : `r ${figure}`);
 
 const print = (figure: Expression, oneWord = false): string => wrap(String(figure), oneWord);
 

@@ -48,6 +48,9 @@ export function sectionOf(solids: readonly Solid[], thickness: number): Section 
 /** Relative difference of i1 and i2 below which no axis is the principal one. */
 const EQUAL = 1e-12;
 
+/** Degrees: directions this near −90° are 90°. */
+const CUT = 1e-9;
+
 function principalOf(ix: number, iy: number, ixy: number): Section['principal'] {
   const mean = (ix + iy) / 2;
   const half = (ix - iy) / 2;
@@ -55,7 +58,8 @@ function principalOf(ix: number, iy: number, ixy: number): Section['principal'] 
   const [i1, i2] = [mean + spread, mean - spread];
   if (spread <= EQUAL * mean) return { i1, i2, angle: null };
   const angle = (Math.atan2(-ixy, half) * 90) / Math.PI;
-  return { i1, i2, angle: angle <= -90 ? angle + 180 : angle };
+  // An axis along y is 90°, whichever side of the cut rounding puts it.
+  return { i1, i2, angle: angle <= CUT - 90 ? 90 : angle };
 }
 
 function own(solid: Solid, thickness: number): Own {

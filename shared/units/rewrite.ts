@@ -185,6 +185,9 @@ function unknownName(name: string, called: boolean): string {
 
 function sideBySide(token: Token, tokens: readonly Token[], i: number, source: string, names: Names): string {
   const before = tokens[i - 1]!;
+  if (token.kind === 'name' && unitAt(token, names) !== null) {
+    return `A unit stands behind a figure or a bracket, once: "${token.name}" can't stand here.`;
+  }
   if (token.kind === 'name' && !names.isVariable(token.name) && !names.isFunction(token.name)) {
     return `"${token.name}" is not a unit and not a sign.`;
   }
