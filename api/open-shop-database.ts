@@ -5,7 +5,7 @@ import type { Config } from './config';
 import { migrate } from './migrations/migrate';
 import { type Database, openDatabase } from './models/database';
 import { seedDemo } from './seeders/demo/seed-demo';
-import { openShop } from './services/shop';
+import { openShop, shopFilled } from './services/shop';
 
 export async function openShopDatabase(
   config: Pick<Config, 'dataDir' | 'shop' | 'shopName'>,
@@ -16,8 +16,9 @@ export async function openShopDatabase(
   const database = openDatabase(join(config.dataDir, 'leafwright.sqlite'));
   try {
     await migrate(database);
-    await openShop(database, config, now);
-    if (config.shop === 'demo') await seed(database, now);
+    const { toFill } = await openShop(database, config, now);
+    if (toFill && config.shop === 'demo') await seed(database, now);
+    if (toFill) await shopFilled(database, now);
     return database;
   } catch (error) {
     await database.close();

@@ -28,10 +28,18 @@ async function start(config: Config): Promise<void> {
     now: () => new Date(),
   });
   const server = createServer(app.express);
-  await listen(server, config);
+  try {
+    await listen(server, config);
+  } catch (error) {
+    await database.close();
+    throw error;
+  }
   process.stdout.write(greeting(config, (server.address() as AddressInfo).port));
 
+  let stopping = false;
   const stop = (): void => {
+    if (stopping) return;
+    stopping = true;
     const late = setTimeout(() => server.closeAllConnections(), PATIENCE);
     server.close(() => {
       clearTimeout(late);
@@ -43,8 +51,8 @@ async function start(config: Config): Promise<void> {
     });
     server.closeIdleConnections();
   };
-  process.once('SIGINT', stop);
-  process.once('SIGTERM', stop);
+  process.on('SIGINT', stop);
+  process.on('SIGTERM', stop);
 }
 
 function listen(server: Server, { port, host }: Config): Promise<void> {

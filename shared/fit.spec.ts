@@ -17,6 +17,7 @@ const CHANNEL: PartDocument = {
   ],
 };
 const HAT: PartDocument = {
+  seat: 2,
   ...CHANNEL,
   chain: [
     { leg: 0.75 },

@@ -7,7 +7,7 @@ module.exports = (config) => {
     frameworks: ['jasmine'],
     plugins: [require('karma-jasmine'), require('karma-chrome-launcher')],
     client: { jasmine: { random: true } },
-    reporters: ['progress'],
+    reporters: ['dots'],
     browsers: ['Chromium'],
     customLaunchers: {
       Chromium: {

@@ -43,7 +43,8 @@ export function isBuilt(what, root = ROOT) {
 /** @param {'app' | 'api'} what @param {{ quiet?: boolean }} options quiet: says nothing unless the build fails */
 export function ensureBuilt(what, { quiet = false } = {}) {
   if (isBuilt(what)) return;
-  if (!quiet) process.stderr.write(`Building the ${what === 'app' ? 'app' : 'API'} …\n`);
+  const words = what === 'app' ? 'app' : 'API';
+  if (!quiet) process.stderr.write(`Building the ${words} …\n`);
   // Taken before the build: a file saved while it runs makes the next start build again.
   const before = fingerprint(WHAT[what].sources, ROOT);
   rmSync(stampOf(what, ROOT), { force: true });
@@ -54,7 +55,7 @@ export function ensureBuilt(what, { quiet = false } = {}) {
   });
   if (run.status !== 0) {
     if (quiet) process.stderr.write(`${run.stdout}${run.stderr}`);
-    throw new Error(`The ${what} could not be built; the messages above say where.`);
+    throw new Error(`The ${words} could not be built; the messages above say where.`);
   }
   mkdirSync(join(ROOT, 'dist'), { recursive: true });
   writeFileSync(stampOf(what, ROOT), before);

@@ -1,4 +1,5 @@
 /** Part documents from standard input, one JSON a line; one result a line on standard output. */
+import { fstatSync } from 'node:fs';
 import type { SolveResult } from '../../shared/result';
 import { solveRequest } from '../../shared/solve-request';
 
@@ -39,7 +40,9 @@ async function main(): Promise<number> {
   return failed ? 1 : 0;
 }
 
-async function* linesOf(stream: NodeJS.ReadStream): AsyncGenerator<string> {
+async function* linesOf(stream: NodeJS.ReadStream & { readonly fd: number }): AsyncGenerator<string> {
+  // Node reads a directory as an empty stream; to whoever gave it, that must not look like "nothing to do".
+  if (fstatSync(stream.fd).isDirectory()) throw new Error('it is a directory.');
   stream.setEncoding('utf8');
   let rest = '';
   for await (const chunk of stream as AsyncIterable<string>) {

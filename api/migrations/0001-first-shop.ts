@@ -6,7 +6,8 @@ export const firstShop = {
        id INTEGER PRIMARY KEY CHECK (id = 1),
        name TEXT NOT NULL,
        kind TEXT NOT NULL CHECK (kind IN ('demo', 'own')),
-       created_at TEXT NOT NULL
+       created_at TEXT NOT NULL,
+       filled_at TEXT
      )`,
     `CREATE TABLE people (
        id TEXT PRIMARY KEY,
@@ -40,9 +41,10 @@ export const firstShop = {
      )`,
     // A number belongs to one part, whatever its case: hc-2101-1 on the shop floor is HC-2101-1.
     'CREATE UNIQUE INDEX parts_number ON parts (number COLLATE NOCASE)',
-    'CREATE INDEX parts_number_key ON parts (number_key, id)',
-    'CREATE INDEX parts_title_key ON parts (title_key, id)',
-    'CREATE INDEX parts_changed ON parts (changed_at, id)',
+    // The text of the search lies in the indexes that sort: a rare word is found without opening every part.
+    'CREATE INDEX parts_number_key ON parts (number_key, id, search_text)',
+    'CREATE INDEX parts_title_key ON parts (title_key, id, search_text)',
+    'CREATE INDEX parts_changed ON parts (changed_at, id, search_text)',
     'CREATE INDEX parts_material ON parts (material, unit)',
     'CREATE INDEX parts_unit ON parts (unit)',
     `CREATE TABLE revisions (

@@ -8,6 +8,8 @@ export interface ShopRecord extends Model<InferAttributes<ShopRecord>, InferCrea
   name: string;
   kind: ShopKind;
   createdAt: string;
+  /** When a new shop had all that it starts with; null while its first start is not through. */
+  filledAt: string | null;
 }
 
 export const defineShop = (sequelize: Sequelize): ModelStatic<ShopRecord> =>
@@ -18,6 +20,7 @@ export const defineShop = (sequelize: Sequelize): ModelStatic<ShopRecord> =>
       name: { type: DataTypes.STRING, allowNull: false },
       kind: { type: DataTypes.STRING, allowNull: false },
       createdAt: { type: DataTypes.STRING, allowNull: false },
+      filledAt: { type: DataTypes.STRING },
     },
     { tableName: 'shop' },
   );

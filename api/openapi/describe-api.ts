@@ -13,17 +13,19 @@ const DOCUMENT = { $ref: '#/components/schemas/PartDocument' };
 
 /** Part documents stand in the contracts as "anything", since the engine's gate judges them; described they are what that gate wants. */
 function jsonSchema(schema: z.ZodType, io: 'input' | 'output'): Json {
-  const { $schema: _, ...described } = z.toJSONSchema(schema, {
+  const described = z.toJSONSchema(schema, {
     io,
     unrepresentable: 'any',
     override: ({ zodSchema, jsonSchema: target }) => {
-      const meta = (zodSchema as z.ZodType).meta();
-      if (meta?.['documents'] !== 'PartDocument') return;
-      for (const key of Object.keys(target)) delete (target as Json)[key];
+      // "Anything" has no keywords of its own to get in the way.
+      if (z.globalRegistry.get(zodSchema)?.['documents'] !== 'PartDocument') return;
+      delete (target as Json)['documents'];
       Object.assign(target, DOCUMENT);
     },
   }) as Json;
-  return described;
+  const { $schema: _, $defs, ...bare } = described;
+  // A schema with a name of its own comes as a reference to it; the place it stands in has the name already.
+  return Object.values(($defs ?? {}) as Record<string, Json>)[0] ?? bare;
 }
 
 function refusals(operation: Operation): ProblemKind[] {

@@ -1,6 +1,6 @@
 /** Session: who is signed in, signing in and out. */
 import type { Request, Response } from 'express';
-import type { Authenticator } from 'passport';
+import type passportModule from 'passport';
 import { Strategy } from 'passport-local';
 import { type Person, type Session, sessionSchema, signInSchema } from '../../shared/contracts/session';
 import type { Csrf } from '../middleware/csrf';
@@ -14,7 +14,7 @@ import { type Operation, operation } from './operation';
 
 interface SessionDeps {
   readonly database: Database;
-  readonly passport: Authenticator;
+  readonly passport: InstanceType<typeof passportModule.Passport>;
   readonly csrf: Csrf;
   readonly limits: SignInLimits;
   readonly version: string;

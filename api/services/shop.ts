@@ -10,19 +10,19 @@ const WORDS = { demo: 'a demo shop', own: 'a shop of your own' } as const;
 
 export const readShop = (database: Database): Promise<ShopRecord | null> => database.shop.findByPk(1, { raw: true });
 
-/** Founds the shop on the first start; later a start must be for the same kind. Says whether it is new. */
+/** Founds the shop on the first start; later a start must be for the same kind. Says whether it still has to be filled. */
 export async function openShop(
   database: Database,
   config: Pick<Config, 'shop' | 'shopName' | 'dataDir'>,
   now: Date,
-): Promise<{ founded: boolean }> {
+): Promise<{ toFill: boolean }> {
   return database.write(async (transaction) => {
     const shop = await database.shop.findByPk(1, { transaction });
     if (!shop) {
       const name = config.shop === 'demo' ? DEMO_SHOP_NAME : (config.shopName ?? 'Our shop');
-      const founded = { id: 1, name, kind: config.shop, createdAt: now.toISOString() };
+      const founded = { id: 1, name, kind: config.shop, createdAt: now.toISOString(), filledAt: null };
       await database.shop.create(founded, { transaction });
-      return { founded: true };
+      return { toFill: true };
     }
     if (shop.kind !== config.shop) {
       throw new StartRefused(
@@ -33,9 +33,14 @@ export async function openShop(
     if (shop.kind === 'own' && config.shopName !== null && config.shopName !== shop.name) {
       await shop.update({ name: config.shopName }, { transaction });
     }
-    return { founded: false };
+    return { toFill: shop.filledAt === null };
   });
 }
+
+export const shopFilled = (database: Database, now: Date): Promise<unknown> =>
+  database.write((transaction) =>
+    database.shop.update({ filledAt: now.toISOString() }, { where: { id: 1 }, transaction }),
+  );
 
 export async function describeShop(database: Database): Promise<z.infer<typeof shopSchema>> {
   const shop = await readShop(database);

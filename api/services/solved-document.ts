@@ -1,5 +1,6 @@
 /** The one way a document gets into the database: through the engine's gate and through the engine, here on the server. */
 import { outlineOf } from '../../shared/formed/outline';
+import { seated } from '../../shared/formed/seated';
 import type { PartDocument } from '../../shared/part/document';
 import { restore } from '../../shared/part/restore';
 import type { Refused, Solved } from '../../shared/result';
@@ -27,7 +28,7 @@ export function solveDocument(value: unknown): SolvedDocument | Refused {
   if (!restored.ok) return restored;
   const result = solve(restored.document);
   if (!result.ok) return result;
-  const faces = result.formed?.faces;
+  const faces = seated(result);
   const outline = faces ? outlineOf(faces) : null;
   return {
     ok: true,

@@ -11,7 +11,7 @@ const RADIAN = Math.PI / 180;
  * @param k K, neutral line at K·T from the inside face, 0 < K ≤ 1
  * @returns BA in the part's unit; never fails inside the range
  * @source definition of the K-factor
- * @example kFactorAllowance(90, 0.25, 0.051, 0.5) // 0.43276…
+ * @example kFactorAllowance(90, 0.25, 0.051, 0.5) // 0.43275…
  */
 export function kFactorAllowance(angle: number, radius: number, thickness: number, k: number): number {
   return angle * RADIAN * (radius + k * thickness);

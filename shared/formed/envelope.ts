@@ -1,5 +1,6 @@
 import { arcPoint, Curve, covers, ends } from '../geometry/curve';
 import { direction } from '../geometry/direction';
+import { exceeds } from '../geometry/tolerance';
 import type { LegResult, XY } from '../result';
 import { sides } from './faces';
 import type { Bar, Solid } from './solid';
@@ -56,5 +57,5 @@ export function extent(curves: readonly Curve[], heading = 0): readonly [number,
 }
 
 function largestFlat(legs: readonly LegResult[]): number {
-  return legs.reduce((best, leg, i) => (leg.flat > legs[best]!.flat ? i : best), 0);
+  return legs.reduce((best, leg, i) => (exceeds(leg.flat, legs[best]!.flat) ? i : best), 0);
 }

@@ -30,7 +30,7 @@ export function outlineOf(faces: Faces): Outline | null {
   const commands = [`M${pair(begin)}`];
   for (const curve of steps) {
     const [from, to] = ends(curve);
-    if (Math.hypot(from[0] - at[0], from[1] - at[1]) > 0) commands.push(`L${pair(from)}`);
+    if (pair(from) !== pair(at)) commands.push(`L${pair(from)}`);
     commands.push(curve.kind === 'segment' ? `L${pair(to)}` : arcCommand(curve.radius, curve.sweep, to));
     at = to;
   }

@@ -17,7 +17,7 @@ export type JoggleShape =
  * @returns angle of each bend in degrees and the straight, or the shortest run that these radii allow:
  *   `√(2ρD − D²)` for D ≤ ρ, else ρ
  * @source geometry: two arcs of radius R + T/2 at mid-thickness joined by their common tangent
- * @example joggle(0.04, 0.25, 0.125, 0.04) // { ok: true, angle: 10.11…, straight: 0.2022… }
+ * @example joggle(0.04, 0.25, 0.125, 0.04) // { ok: true, angle: 10.109…, straight: 0.2022… }
  */
 export function joggle(depth: number, run: number, radius: number, thickness: number): JoggleShape {
   const rho = 2 * radius + thickness;

@@ -91,7 +91,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'hat',
     name: 'Hat',
-    says: 'Height from under the feet to the top of the crown, crown outside to outside, feet from edge to the outside of the web.',
+    says: 'Height from under the feet to the top of the crown, crown outside to outside, feet from edge to the far face of the web.',
     sizes: [size('foot', 'Each foot', '3/4', '20'), HEIGHT, size('crown', 'Crown width', '1 1/2', '40')],
     make: square(
       [
@@ -141,14 +141,15 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'sloped-hat',
     name: 'Hat with sloped webs',
-    says: 'Height from under the feet to the top of the crown; crown and feet to the sharp outside corners; webs at the angle that they are bent up from the feet.',
+    says: 'Height from the top of the feet to the top of the crown; crown and feet to the sharp outside corners; webs at the angle that they are bent up from the feet.',
     sizes: [
       size('foot', 'Each foot', '3/4', '20'),
-      HEIGHT,
+      size('height', 'Height above the feet', '1', '25'),
       size('crown', 'Crown width', '1', '25'),
       { key: 'angle', label: 'Bend angle', initial: { in: '60', mm: '60' }, angle: true },
     ],
     make: (sizes, radius) => {
+      // Both its corners lie on one face, so that the slope alone turns its length into height, whatever the thickness.
       const web = `(${sizes['height'] ?? ''}) / sin(${sizes['angle'] ?? ''})`;
       const bend = (turn: 'up' | 'down'): ChainEntry => ({
         bend: figure(sizes['angle'] ?? ''),
@@ -159,11 +160,11 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
       return [
         { leg: foot, name: 'Left foot' },
         bend('up'),
-        { leg: web, name: 'Left web' },
+        { leg: web, name: 'Left web', measure: ['inside', 'mold-line'] },
         bend('down'),
         { leg: figure(sizes['crown'] ?? ''), name: 'Crown' },
         bend('down'),
-        { leg: web, name: 'Right web' },
+        { leg: web, name: 'Right web', measure: ['mold-line', 'inside'] },
         bend('up'),
         { leg: foot, name: 'Right foot' },
       ];

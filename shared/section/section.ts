@@ -55,7 +55,9 @@ function principalOf(ix: number, iy: number, ixy: number): Section['principal'] 
   const mean = (ix + iy) / 2;
   const half = (ix - iy) / 2;
   const spread = Math.hypot(half, ixy);
-  const [i1, i2] = [mean + spread, mean - spread];
+  // What the lean adds to the greater moment and takes from the lesser; mean ∓ spread would lose the digits of a slender i2.
+  const lean = ixy === 0 ? 0 : ixy * (ixy / (spread + Math.abs(half)));
+  const [i1, i2] = [Math.max(ix, iy) + lean, Math.min(ix, iy) - lean];
   if (spread <= EQUAL * mean) return { i1, i2, angle: null };
   const angle = (Math.atan2(-ixy, half) * 90) / Math.PI;
   // An axis along y is 90°, whichever side of the cut rounding puts it.

@@ -1,5 +1,5 @@
 /** What a shop knows and a part does not: its choices and limits. Everything is optional; a part can be solved without a shop. */
-import { z } from 'zod';
+import * as z from 'zod';
 import type { FieldError } from '../result';
 
 /** Limits of common practice, which a shop may set for itself. None has a published source. */
@@ -49,7 +49,7 @@ export interface ShopRules {
 export type RestoredShop =
   { readonly ok: true; readonly rules: ShopRules } | { readonly ok: false; readonly errors: readonly FieldError[] };
 
-const OPEN: ShopRules = { radiusRule: 'stricter', limits: { ...COMMON_PRACTICE, holeEdge: HOLE_EDGE } };
+const OPEN: ShopRules = { radiusRule: 'AC 43.13-1B', limits: { ...COMMON_PRACTICE, holeEdge: HOLE_EDGE } };
 
 /**
  * The gate for a shop context of unknown origin.

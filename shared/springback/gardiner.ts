@@ -14,7 +14,7 @@ const MOST_STEPS = 64;
  * @param thickness T > 0 @param material with modulus E and yield stress Y in one unit, or null
  * @returns tool radius in the part's unit and tool angle in degrees; null when E or Y is not known
  * @source F. J. Gardiner, "The springback of metals", Trans. ASME 79 (1957)
- * @example gardiner(90, 0.125, 0.04, { name: 'x', modulus: 73000, yield: 345 })?.toolAngle // 91.2…
+ * @example gardiner(90, 0.125, 0.04, { name: 'x', modulus: 73000, yield: 345 })?.toolAngle // 93.41…
  */
 export function gardiner(
   angle: number,

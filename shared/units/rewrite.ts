@@ -106,6 +106,12 @@ export function rewrite(
     // The unit behind a fraction belongs to the whole fraction: 1/8 in is an eighth of an inch.
     const fraction = figure.count === 1 ? fractionAt(tokens, i) : null;
     const fractionUnit = fraction === null ? null : unitAt(tokens[i + 3], names);
+    const before = tokens[i - 1];
+    if (fractionUnit !== null && before?.kind === 'sign' && before.sign === '/') {
+      const end = tokens[i + 3]!.end;
+      const message = `Divided by "${source.slice(token.start, end)}" can be read two ways: put brackets around what belongs together.`;
+      return { error: { message, start: token.start, end } };
+    }
     const unit = fractionUnit ?? unitAt(tokens[next], names);
     const value = fractionUnit === null ? figure.value : fraction!;
     if (fractionUnit !== null) next = i + 3;

@@ -1,4 +1,6 @@
 /** Fills a new demo shop: its people, and its parts by the same way that everybody's parts are saved. */
+import type { Transaction } from 'sequelize';
+import type { Person } from '../../../shared/contracts/session';
 import type { Database } from '../../models/database';
 import { createPart } from '../../services/parts';
 import { hashPassword } from '../../services/password';
@@ -11,22 +13,31 @@ const MINUTE = 60 * 1000;
 export async function seedDemo(database: Database, now: Date, hash = hashPassword): Promise<void> {
   // One hash for all of them: the password is printed at the start anyway.
   const passwordHash = await hash(DEMO_PASSWORD);
-  const people = await database.write(async (transaction) => {
-    // A start that was cut short has left people or parts behind; they stay as they are.
-    const known = await database.people.count({ transaction });
-    if (known > 0) return null;
-    const added = [];
-    for (const { email, name, roles } of DEMO_PEOPLE) {
-      added.push(await addPerson(database, { email, name, roles: [...roles], passwordHash }, now, transaction));
-    }
-    return added;
-  });
-  const designer = people?.find((person) => person.roles.includes('designer'));
-  if (!designer) return;
+  const people = await database.write((transaction) => demoPeople(database, passwordHash, now, transaction));
+  const designer = people.find((person) => person.roles.includes('designer'));
+  if (!designer) throw new Error('The demo shop has no designer.');
   for (const [i, part] of DEMO_PARTS.entries()) {
     // A minute apart, the last one newest: the register sorts by it.
     const at = new Date(now.getTime() - (DEMO_PARTS.length - i) * MINUTE);
     const outcome = await createPart(database, part, designer, at);
-    if (!outcome.ok) throw new Error(`Demo part ${part.number} is refused: ${JSON.stringify(outcome)}`);
+    // Taken: a start that was cut short has made it already.
+    if (!outcome.ok && outcome.reason !== 'taken')
+      throw new Error(`Demo part ${part.number} is refused: ${JSON.stringify(outcome)}`);
   }
+}
+
+/** All or none of them. */
+async function demoPeople(
+  database: Database,
+  passwordHash: string,
+  now: Date,
+  transaction: Transaction,
+): Promise<Person[]> {
+  const known = await database.people.findAll({ transaction });
+  if (known.length > 0) return known.map(({ id, email, name, roles }) => ({ id, email, name, roles }));
+  const added: Person[] = [];
+  for (const { email, name, roles } of DEMO_PEOPLE) {
+    added.push(await addPerson(database, { email, name, roles: [...roles], passwordHash }, now, transaction));
+  }
+  return added;
 }

@@ -2,7 +2,7 @@
 import type { BendResult, Solved } from '@shared/result';
 import type { BendNote } from './bend-notes';
 import { bendNotes, notesRoom } from './bend-notes';
-import { sheetMarks } from './blank-sheet';
+import { breakMarks, sheetMarks } from './blank-sheet';
 import type { Drawing, Mark } from './marks';
 import { linePath } from './marks';
 import type { Station } from './station-labels';
@@ -76,13 +76,14 @@ export function blankDrawing(solved: Solved, options: BlankOptions): BlankDrawin
     width - 8,
   );
   const marks: Mark[] = [
-    ...sheetMarks(solved, { x, top: edge, foot, widthToScale, ...options }),
+    ...sheetMarks(solved, { x, top: edge, foot, ...options }),
     ...lineMarks(bends, x, edge, foot, options),
+    ...(widthToScale ? [] : breakMarks(MARGIN, width - MARGIN, edge, foot)),
     ...heads.marks,
     ...(feet?.marks ?? []),
     ...band.marks,
   ];
-  return { width, height: under + band.height + 4, marks, widthToScale };
+  return { width, height: under + Math.max(band.height, 8) + 4, marks, widthToScale };
 }
 
 type StationAt = Omit<Station, 'x'> & { readonly at: number };
@@ -90,8 +91,8 @@ type StationAt = Omit<Station, 'x'> & { readonly at: number };
 function topStations(bends: readonly Placed[], length: number, options: BlankOptions): StationAt[] {
   const { figureOf, lines } = options;
   const ends: StationAt[] = [
-    { at: 0, text: '0', role: 'end-station', line: 'edge' },
-    { at: length, text: figureOf(length), role: 'end-station', line: 'edge' },
+    { at: 0, text: '0', role: 'end-station', leader: true },
+    { at: length, text: figureOf(length), role: 'end-station', leader: true },
   ];
   return [...ends, ...(lines === 'sight lines' ? sightStations(bends, options) : tangentStations(bends, options))];
 }
@@ -100,7 +101,7 @@ function tangentStations(bends: readonly Placed[], { figureOf, selected }: Blank
   return bends.flatMap((bend) =>
     [bend.tangentStart, bend.tangentEnd].map((at): StationAt => {
       const common = { pick: bend.chain, selected: bend.chain === selected };
-      return { at, text: figureOf(at), role: 'station', line: 'tangent', ...common };
+      return { at, text: figureOf(at), role: 'station', leader: true, ...common };
     }),
   );
 }
@@ -109,7 +110,7 @@ function sightStations(bends: readonly Placed[], { figureOf, selected }: BlankOp
   return bends.flatMap((bend) =>
     (bend.sightLine ? [bend.sightLine.startUnderNose, bend.sightLine.endUnderNose] : []).map((at): StationAt => {
       const common = { pick: bend.chain, selected: bend.chain === selected };
-      return { at, text: figureOf(at), role: 'station', line: 'sight', ...common };
+      return { at, text: figureOf(at), role: 'station', leader: true, ...common };
     }),
   );
 }

@@ -7,7 +7,6 @@ export interface SheetPlace {
   readonly x: (station: number) => number;
   readonly top: number;
   readonly foot: number;
-  readonly widthToScale: boolean;
   readonly selected: number | null;
   readonly figureOf: (length: number) => string;
   readonly grain: 'along' | 'across' | null;
@@ -39,7 +38,6 @@ export function sheetMarks(solved: Solved, place: SheetPlace): Mark[] {
     { kind: 'path', role: 'sheet', d: box(x(0), top, x(end), foot) },
     ...zones,
     ...picked,
-    ...(place.widthToScale ? [] : breakMarks(place, end)),
     { kind: 'path', role: 'edge', d: box(x(0), top, x(end), foot) },
     ...hits,
     ...legs.flatMap((leg) => flatMarks(leg, place, leg === grainLeg)),
@@ -51,11 +49,14 @@ type PlacedLeg = LegResult & { start: number; end: number };
 
 const isPlaced = (leg: LegResult): leg is PlacedLeg => leg.start !== null && leg.end !== null;
 
-/** Long break lines across the free ends: this way the blank goes on for longer than it is drawn. */
-function breakMarks({ x, top, foot }: SheetPlace, end: number): Mark[] {
-  const y = foot - Math.min(16, (foot - top) / 5);
-  const zigzag = (at: number): string => `M${at - 7} ${y + 3}h4l3 -10l3 14l2 -4h4`;
-  return [{ kind: 'path', role: 'break', d: zigzag(x(0)) + zigzag(x(end)) }];
+/** A gap from side to side between long break lines: this way the blank goes on for longer than it is drawn. */
+export function breakMarks(left: number, right: number, top: number, foot: number): Mark[] {
+  const y = foot - Math.min(20, (foot - top) / 4);
+  const zigzag = 'l4 -6l6 12l4 -6';
+  const back = 'l-4 6l-6 -12l-4 6';
+  const edge = `M${left - 8} ${y}H${left + 40}${zigzag}H${right - 54}${zigzag}H${right + 8}`;
+  const under = `v5H${right - 40}${back}H${left + 54}${back}H${left - 8}Z`;
+  return [{ kind: 'path', role: 'break', d: edge + under }];
 }
 
 /** Name and flat of a leg in its middle: both, or the figure alone, or nothing, by the room there is. */
@@ -88,7 +89,7 @@ function shortened(name: string, room: number): string {
 
 function roomiest(legs: readonly PlacedLeg[], { x }: SheetPlace): PlacedLeg | null {
   const widest = [...legs].sort((a, b) => b.flat - a.flat)[0];
-  return widest && x(widest.end) - x(widest.start) >= 60 ? widest : null;
+  return widest && x(widest.end) - x(widest.start) >= 104 ? widest : null;
 }
 
 /** An arrow with two heads in the direction of the grain: square to the bend lines or along them. */

@@ -18,6 +18,7 @@ export class Clearance {
   private readonly texts: Box[] = [];
   private readonly lines: Segment[] = [];
   private readonly thin: Segment[] = [];
+  private readonly marks: Box[] = [];
 
   constructor(
     private readonly paper: Box,
@@ -31,8 +32,9 @@ export class Clearance {
     this.thin.push(...footprint.thin);
   }
 
-  addText(box: Box): void {
-    this.texts.push(box);
+  /** A small mark: texts keep off it, lines may pass through it. */
+  addMark(box: Box): void {
+    this.marks.push(box);
   }
 
   /** 0 is clear; crossings that drafting allows cost a little; from CLASH up it can't stand. */
@@ -41,17 +43,18 @@ export class Clearance {
     for (const text of texts) {
       if (!contains(this.paper, text)) return CLASH;
       const clear = grown(text, 3);
-      if (this.texts.some((other) => overlaps(clear, other))) return CLASH;
+      if ([...this.texts, ...this.marks].some((other) => overlaps(clear, other))) return CLASH;
       if ([this.outline, this.lines, this.thin].some((those) => those.some((line) => hits(clear, line)))) return CLASH;
     }
     for (const line of [...lines, ...thin]) if (this.texts.some((text) => hits(grown(text, 2), line))) return CLASH;
+    for (const line of [...lines, ...thin]) cost += 6 * this.marks.filter((mark) => hits(mark, line)).length;
     for (const line of lines) {
       if (this.outline.some((edge) => cross(line, edge))) return CLASH;
       if (this.lines.some((other) => cross(line, other) || tooNear(line, other))) return CLASH;
       cost += 12 * this.thin.filter((other) => cross(line, other)).length;
     }
     for (const line of thin) {
-      cost += 8 * this.lines.filter((other) => cross(line, other)).length;
+      cost += 30 * this.lines.filter((other) => cross(line, other)).length;
       cost += 15 * this.outline.filter((edge) => cross(line, edge)).length;
     }
     return cost;

@@ -14,12 +14,13 @@ import { paint } from './paint';
 /** A drawing on the page. What it says in words is the caller's to give: as `label` here and as text beside it. */
 @Component({
   selector: 'lw-drawing-view',
-  template: '<svg #paper role="img" class="drawing" [attr.aria-label]="label()" (click)="choose($event)"></svg>',
+  template: '<svg #paper role="img" class="drawing" [attr.aria-label]="label()"></svg>',
   styleUrl: './drawing-view.scss',
   // The marks are made by svg.js and carry no attribute of this component.
   encapsulation: ViewEncapsulation.None,
   changeDetection: ChangeDetectionStrategy.OnPush,
-  host: { class: 'lw-drawing', '[class.flat]': 'flat()' },
+  // Whatever a click selects here, the ledger selects by keyboard.
+  host: { class: 'lw-drawing', '[class.flat]': 'flat()', '(click)': 'choose($event)' },
 })
 export class DrawingView {
   readonly drawing = input.required<Drawing>();

@@ -71,7 +71,7 @@ function metalMarks(frames: Frames, view: View, selected: number | null): Mark[]
   });
   const picked = frames.stretches.flatMap((stretch, index): Mark[] =>
     stretch.chain === selected
-      ? [{ kind: 'path', role: 'bend', d: stretchPath(frames, index, view), pick: stretch.chain, selected: true }]
+      ? [{ kind: 'path', role: 'leg', d: stretchPath(frames, index, view), pick: stretch.chain, selected: true }]
       : [],
   );
   const hits = frames.stretches.map((stretch, index): Mark => {
@@ -87,7 +87,7 @@ const CROSS = 5;
 
 function moldMarks(solved: Solved, view: View, clearance: Clearance): Mark[] {
   const points = (solved.formed?.moldPoints ?? []).flatMap((point) => (point ? [view.place(point)] : []));
-  for (const { x, y } of points) clearance.addText(boxAround({ x, y }, CROSS, CROSS));
+  for (const { x, y } of points) clearance.addMark(boxAround({ x, y }, CROSS, CROSS));
   const crosses = points.map(({ x, y }) => `M${x - CROSS} ${y}h${2 * CROSS}M${x} ${y - CROSS}v${2 * CROSS}`);
   return crosses.length === 0 ? [] : [{ kind: 'path', role: 'mold', d: crosses.join('') }];
 }

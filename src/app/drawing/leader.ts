@@ -1,6 +1,6 @@
 /** A note on a leader: the text where it clashes with nothing, the line from it to what it speaks of. */
 import type { Box } from './box';
-import { boundsOf } from './box';
+import { boundsOf, hits } from './box';
 import type { Clearance } from './clearance';
 import { CLASH } from './clearance';
 import type { Mark, TextMark } from './marks';
@@ -63,6 +63,8 @@ export function leaderNote(
         if (base >= least) continue;
         const candidate = plan(tip, knee, right, upper, lower, pick);
         const line = { from: along(tip, away, 3), to: knee };
+        // A knee that turns back would draw the leader through its own note.
+        if (hits(candidate.box, line)) continue;
         const cost = base + clearance.cost({ texts: [candidate.box], lines: [], thin: [line] });
         if (cost >= least) continue;
         least = cost;

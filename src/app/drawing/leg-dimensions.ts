@@ -6,12 +6,16 @@ import type { DimensionPlan, FigurePlace } from './dimension';
 import { planDimension } from './dimension';
 import type { Frames, Stretch } from './formed-frames';
 import { forward, normal } from './formed-frames';
+import { facePoints } from './formed-outline';
 import type { Mark } from './marks';
 import type { Point } from './point';
 import { direction } from './point';
 import type { View } from './view';
 
 const OFFSETS = [28, 46, 64, 86, 110, 138];
+/** Clear of the whole part, when there is nowhere nearer; on a part of many legs long extension lines would only confuse. */
+const OUTSIDE = [28, 48, 68];
+const FEW_LEGS = 9;
 const FIGURES: readonly FigurePlace[] = ['between', 'past-end', 'past-start'];
 
 export interface LegDimensions {
@@ -70,7 +74,8 @@ function bestPlan(
   for (const side of [1, -1] as const) {
     const [a, b] = [onSide(frames, stretch, from, side), onSide(frames, stretch, to, side)];
     const outward = direction(view.place(onSide(frames, stretch, from, -side as 1 | -1)), view.place(a));
-    OFFSETS.forEach((offset, level) => {
+    const beyond = frames.stretches.length > FEW_LEGS ? [] : outsideOffsets(frames, view, view.place(a), outward);
+    [...OFFSETS, ...beyond].forEach((offset, level) => {
       for (const [rank, figure] of FIGURES.entries()) {
         const base = level * 10 + (side === outer ? 0 : 14) + rank * 2;
         if (base >= least) continue;
@@ -84,6 +89,18 @@ function bestPlan(
     });
   }
   return best;
+}
+
+/** From a measured point to past everything that lies on that side. */
+function outsideOffsets(frames: Frames, view: View, foot: Point, outward: Point): number[] {
+  const reach = (['lower', 'upper'] as const).flatMap((face) =>
+    facePoints(frames, face).map((point) => {
+      const { x, y } = view.place(point);
+      return (x - foot.x) * outward.x + (y - foot.y) * outward.y;
+    }),
+  );
+  const past = Math.max(...reach);
+  return past < 10 ? [] : OUTSIDE.map((more) => past + more);
 }
 
 /** Where the dimension ends, on the lower face extended: the tangent line, and beyond it by the setback. */

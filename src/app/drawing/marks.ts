@@ -5,6 +5,7 @@ import type { Point } from './point';
 export type LineRole =
   | 'sheet'
   | 'bend'
+  | 'leg'
   | 'zone'
   | 'edge'
   | 'break'
@@ -65,7 +66,8 @@ function emsOf(letter: string): number {
   if (/[ .,:;·'|ijl]/.test(letter)) return 0.31;
   if (/[mwMW—]/.test(letter)) return 0.92;
   if (/[A-Z]/.test(letter)) return 0.66;
-  return /[\u0000-\u024f]/.test(letter) ? 0.58 : 1;
+  // Beyond Latin nothing is known of a letter but that it is no wider than the line is high.
+  return (letter.codePointAt(0) ?? 0) < 0x250 ? 0.58 : 1;
 }
 
 export const textHeight = (role: TextRole): number => TEXT_SIZE[role] * 1.2;

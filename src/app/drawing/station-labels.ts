@@ -8,8 +8,8 @@ export interface Station {
   readonly x: number;
   readonly text: string;
   readonly role: TextRole;
-  /** The line that belongs to it, or none for the ends of the blank. */
-  readonly line: 'tangent' | 'sight' | 'centre' | 'edge' | null;
+  /** Whether a leader joins it to its line. */
+  readonly leader: boolean;
   readonly pick?: number;
   readonly selected?: boolean;
 }
@@ -75,8 +75,8 @@ export function stationLabels(
       anchor: 'middle',
       ...common,
     };
-    if (station.line === null) return [text];
-    return [{ kind: 'path', role: station.line, d: `M${points.map(at).join('L')}`, ...common }, text];
+    if (!station.leader) return [text];
+    return [{ kind: 'path', role: 'leader', d: `M${points.map(at).join('L')}`, ...common }, text];
   });
   return { marks, height: first + (rows - 1) * ROW + 12 };
 }

@@ -24,7 +24,8 @@ export function changeUnit(form: NewPartForm, from: Unit, to: Unit): void {
   for (const section of STARTING_SECTIONS) {
     const group: Record<string, string> = {};
     for (const size of section.sizes) {
-      group[size.key] = lengthIn(sizes[section.id]?.[size.key] ?? '', size.initial, from, to);
+      const text = sizes[section.id]?.[size.key] ?? '';
+      group[size.key] = size.angle ? text : lengthIn(text, size.initial, from, to);
     }
     changed[section.id] = group;
   }

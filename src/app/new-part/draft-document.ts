@@ -6,6 +6,7 @@ import type { Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { evaluate } from '@shared/units/expression';
 import type { NewPartValues } from './new-part-form';
+import { SECTION_SEATS } from './section-seats';
 
 /** Messages by field: `thickness`, `size/web`, `chain`, `document`; what belongs to no field stands under `section`. */
 export type Messages = Readonly<Record<string, string>>;
@@ -36,7 +37,11 @@ export function draftFrom(values: NewPartValues, imported: PartDocument | null):
   return { document: null, solved: null, messages, chainErrors };
 }
 
-function composed(values: NewPartValues, messages: Record<string, string>, chainErrors: ChainError[]): PartDocument | null {
+function composed(
+  values: NewPartValues,
+  messages: Record<string, string>,
+  chainErrors: ChainError[],
+): PartDocument | null {
   const chain = values.way === 'chain' ? typed(values, messages, chainErrors) : started(values, messages);
   if (chain === null) return null;
   const material = values.material.trim();
@@ -48,6 +53,7 @@ function composed(values: NewPartValues, messages: Record<string, string>, chain
     ...(values.width.trim() === '' ? {} : { width: values.width }),
     allowance: allowanceOf(values),
     chain,
+    ...seatOf(values),
   };
 }
 
@@ -57,7 +63,17 @@ function allowanceOf({ method, k, hardness }: NewPartValues): Allowance {
   return { method };
 }
 
-function typed(values: NewPartValues, messages: Record<string, string>, chainErrors: ChainError[]): ChainEntry[] | null {
+/** A typed chain says nothing of how the part lies; the engine chooses. */
+function seatOf({ way, section }: NewPartValues): { seat?: number } {
+  const seat = way === 'section' ? SECTION_SEATS.get(section) : undefined;
+  return seat === undefined ? {} : { seat };
+}
+
+function typed(
+  values: NewPartValues,
+  messages: Record<string, string>,
+  chainErrors: ChainError[],
+): ChainEntry[] | null {
   if (values.chain.trim() === '') {
     messages['chain'] = 'Type the chain: lengths of the legs with the bends between them.';
     return null;
@@ -76,9 +92,9 @@ function started(values: NewPartValues, messages: Record<string, string>): Chain
   const sizes = values.sizes[section.id] ?? {};
   const context = { unit: values.unit, scope: new Map() };
   for (const size of section.sizes) {
-    const figure = evaluate(sizes[size.key] ?? '', 'length', context);
+    const figure = evaluate(sizes[size.key] ?? '', size.angle ? 'angle' : 'length', context);
     if (!figure.ok) messages[`size/${size.key}`] = figure.message;
-    else if (figure.value <= 0) messages[`size/${size.key}`] = 'This length must be more than zero.';
+    else if (figure.value <= 0) messages[`size/${size.key}`] = 'This must be more than zero.';
   }
   const radius = evaluate(values.radius, 'length', context);
   if (!radius.ok) messages['radius'] = radius.message;

@@ -15,6 +15,8 @@ export const SHEET_STARTS = {
   width: { in: '', mm: '' },
 } as const satisfies Record<string, Record<Unit, string>>;
 
+const FIRST_SECTION = 'channel';
+
 export type SizeGroup = FormGroup<Record<string, FormControl<string>>>;
 
 /** Everything typed on the page, kept for all three ways at once: changing one's mind loses nothing. */
@@ -38,7 +40,7 @@ export function newPartForm() {
     method: form.control<StartMethod>('handbook'),
     k: form.control('0.44'),
     hardness: form.control<Hardness>('medium'),
-    section: form.control(STARTING_SECTIONS[0]?.id ?? ''),
+    section: form.control(FIRST_SECTION),
     sizes: form.group(sizes),
     chain: form.control(''),
   });

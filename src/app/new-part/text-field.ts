@@ -1,8 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { type FormControl, ReactiveFormsModule } from '@angular/forms';
 import { MatAutocompleteModule } from '@angular/material/autocomplete';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInputModule } from '@angular/material/input';
+import { startWith, switchMap } from 'rxjs';
 import { FieldMatcher } from './field-matcher';
 
 /** One labelled box with its unit, a hint, and the message of whoever refuses what stands in it. */
@@ -10,7 +12,7 @@ import { FieldMatcher } from './field-matcher';
   selector: 'lw-text-field',
   imports: [ReactiveFormsModule, MatAutocompleteModule, MatFormFieldModule, MatInputModule],
   template: `
-    <mat-form-field appearance="outline">
+    <mat-form-field appearance="outline" hideRequiredMarker>
       <mat-label>{{ label() }}</mat-label>
       <input
         matInput
@@ -28,7 +30,7 @@ import { FieldMatcher } from './field-matcher';
       @if (hint(); as hint) {
         <mat-hint>{{ hint }}</mat-hint>
       }
-      <mat-error>{{ control().errors?.['words'] ?? message() }}</mat-error>
+      <mat-error>{{ said().words }}</mat-error>
     </mat-form-field>
     <mat-autocomplete #choices="matAutocomplete">
       @for (choice of suggestions(); track choice) {
@@ -55,6 +57,17 @@ export class TextField {
   readonly message = input<string>();
   readonly suggestions = input<readonly string[]>([]);
 
-  protected readonly matcher = new FieldMatcher(() => this.said());
-  private readonly said = computed(() => this.message() ?? null);
+  private readonly events = toSignal(
+    toObservable(this.control).pipe(switchMap((control) => control.events.pipe(startWith(null)))),
+  );
+  /**
+   * A new object with every event of the control: touched is no signal, and without this the box would not show its
+   * message when the button is pressed before anything was typed.
+   */
+  protected readonly said = computed(() => {
+    this.events();
+    const own: unknown = this.control().errors?.['words'];
+    return { words: typeof own === 'string' ? own : (this.message() ?? null) };
+  });
+  protected readonly matcher = new FieldMatcher(() => this.said().words);
 }

@@ -1,5 +1,5 @@
 /** What things of the part are called on the page. */
-import type { Allowance, AllowanceMethod, Measure } from '@shared/part/document';
+import type { Allowance, AllowanceMethod, Measure, Unit } from '@shared/part/document';
 import type { BendResult, FindingLevel, Solved } from '@shared/result';
 import { formatAngle } from '@shared/units/format';
 
@@ -11,6 +11,8 @@ export const MEASURE_WORDS: Readonly<Record<Measure, string>> = {
   inside: 'inside',
   flat: 'flat',
 };
+
+export const UNIT_WORDS: Readonly<Record<Unit, string>> = { in: 'inches', mm: 'millimetres' };
 
 export const METHOD_WORDS: Readonly<Record<AllowanceMethod, string>> = {
   handbook: 'handbook',
@@ -31,7 +33,9 @@ export const faceUp = (bend: Pick<BendResult, 'turn'>): string => (bend.turn ===
 
 export const bendName = (index: number): string => `L${index + 1}`;
 
-export const betweenLegs = (angle: number): string => `${formatAngle(180 - angle)} between legs`;
+export const between = (angle: number): string => `${formatAngle(180 - angle)} between`;
+
+export const betweenLegs = (angle: number): string => `${between(angle)} legs`;
 
 /** The whole of a bend in a sentence, for those who do not see the drawing. */
 export function bendSentence(solved: Solved, index: number, figure: (length: number) => string): string {

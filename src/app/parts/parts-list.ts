@@ -1,7 +1,8 @@
-import { computed, inject, Injectable, signal } from '@angular/core';
+import { computed, effect, inject, Injectable, signal, untracked } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import type { PartList, PartRow } from '@shared/contracts/parts';
 import { catchError, map, type Observable, of, startWith, Subject, switchMap, takeUntil } from 'rxjs';
+import { Reachability } from '../server/reachability';
 import { type PartQuery, Server } from '../server/server';
 import { ServerProblem } from '../server/server-problem';
 
@@ -20,6 +21,7 @@ interface Asked {
 @Injectable()
 export class PartsList {
   private readonly server = inject(Server);
+  private readonly reachability = inject(Reachability);
   private readonly asked = signal<Asked | null>(null);
   private readonly dropped = new Subject<void>();
   private readonly next = signal<string | null>(null);
@@ -39,6 +41,12 @@ export class PartsList {
         takeUntilDestroyed(),
       )
       .subscribe((answer) => this.take(answer));
+    effect(() => {
+      if (!this.reachability.reachable()) return;
+      untracked(() => {
+        if (this.status() === 'failed') this.again();
+      });
+    });
   }
 
   show(query: PartQuery): void {

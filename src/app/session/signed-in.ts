@@ -8,7 +8,8 @@ export const signedIn: CanActivateFn = async (_route, target) => {
   const router = inject(Router);
   const known = session.state();
   const state = known.is === 'signed-in' ? known : await session.load();
-  if (state.is === 'signed-in') return true;
+  // An outage is no sign-out: the address stays, and the shell says in its place that the server is lost.
+  if (state.is !== 'signed-out') return true;
   const queryParams = target.url === '/' || target.url === '/parts' ? {} : { to: target.url };
   return new RedirectCommand(router.createUrlTree(['/sign-in'], { queryParams }), { replaceUrl: true });
 };

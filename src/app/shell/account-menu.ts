@@ -1,6 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { MatDividerModule } from '@angular/material/divider';
 import { MatMenuModule } from '@angular/material/menu';
 import { MatSnackBar } from '@angular/material/snack-bar';
 import { Router } from '@angular/router';
@@ -14,7 +13,7 @@ const THEME_WORDS: Readonly<Record<Theme, string>> = { system: 'As the system', 
 
 @Component({
   selector: 'lw-account-menu',
-  imports: [MatButtonModule, MatDividerModule, MatMenuModule, Icon],
+  imports: [MatButtonModule, MatMenuModule, Icon],
   templateUrl: './account-menu.html',
   styleUrl: './account-menu.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,14 +1,10 @@
-import { ChangeDetectionStrategy, Component, effect, inject, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { exhaustMap, repeat, timer } from 'rxjs';
 import { Reachability } from '../server/reachability';
-import { SessionStore } from '../session/session-store';
 import { Icon } from '../ui/icon';
+import { OutageWatch } from './outage-watch';
 
-const FIRST_WAIT = 3_000;
-const LONGEST_WAIT = 30_000;
-
-/** Says quietly that the server does not answer, and keeps asking until it does. Nothing on the page is taken away. */
+/** Says quietly that the server does not answer, while the watch keeps asking. The page under it stays. */
 @Component({
   selector: 'lw-outage-bar',
   imports: [MatButtonModule, Icon],
@@ -17,9 +13,9 @@ const LONGEST_WAIT = 30_000;
       @if (!reachability.reachable()) {
         <div class="bar">
           <lw-icon name="lost" />
-          <span>The server can't be reached. What is on the screen stays; trying again by itself.</span>
-          <button matButton type="button" [disabled]="asking()" disabledInteractive (click)="ask()">
-            {{ asking() ? 'Trying …' : 'Try now' }}
+          <span>The server can't be reached. Nothing on this page is lost; trying again by itself.</span>
+          <button matButton type="button" [disabled]="watch.asking()" disabledInteractive (click)="watch.ask()">
+            {{ watch.asking() ? 'Trying …' : 'Try now' }}
           </button>
         </div>
       }
@@ -49,32 +45,5 @@ const LONGEST_WAIT = 30_000;
 })
 export class OutageBar {
   protected readonly reachability = inject(Reachability);
-  private readonly session = inject(SessionStore);
-  protected readonly asking = signal(false);
-
-  constructor() {
-    effect((onCleanup) => {
-      if (this.reachability.reachable()) return;
-      const asking = timer(FIRST_WAIT)
-        .pipe(
-          exhaustMap(() => this.ask()),
-          repeat({ delay: (times) => timer(Math.min(FIRST_WAIT * 2 ** times, LONGEST_WAIT) - FIRST_WAIT) }),
-        )
-        .subscribe();
-      onCleanup(() => asking.unsubscribe());
-    });
-  }
-
-  /** Only asks; who is signed in is left as it stands on the screen. */
-  protected async ask(): Promise<void> {
-    if (this.asking()) return;
-    this.asking.set(true);
-    try {
-      await this.session.renewToken();
-    } catch {
-      // Still no answer: the bar stays.
-    } finally {
-      this.asking.set(false);
-    }
-  }
+  protected readonly watch = inject(OutageWatch);
 }

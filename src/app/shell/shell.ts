@@ -1,11 +1,21 @@
-import { ChangeDetectionStrategy, Component, computed, type ElementRef, inject, viewChild } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  type ElementRef,
+  inject,
+  viewChild,
+} from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { Router, RouterLink, RouterLinkActive, RouterOutlet } from '@angular/router';
+import { Reachability } from '../server/reachability';
 import { SessionStore } from '../session/session-store';
 import { Mark } from '../ui/mark';
 import { AccountMenu } from './account-menu';
 import { LostServer } from './lost-server';
 import { OutageBar } from './outage-bar';
+import { OutageWatch } from './outage-watch';
 
 /** Top bar and the page under it. */
 @Component({
@@ -17,6 +27,7 @@ import { OutageBar } from './outage-bar';
 })
 export class Shell {
   protected readonly session = inject(SessionStore);
+  private readonly reachability = inject(Reachability);
   private readonly router = inject(Router);
   private readonly content = viewChild.required<ElementRef<HTMLElement>>('content');
   protected readonly shopName = computed(() => {
@@ -25,7 +36,11 @@ export class Shell {
   });
 
   constructor() {
+    inject(OutageWatch);
     if (this.session.state().is === 'loading') void this.session.load();
+    effect(() => {
+      if (this.reachability.reachable() && this.session.state().is === 'unreachable') void this.askAgain();
+    });
   }
 
   /** Not a plain `#content` link: with a base href that would leave the page. */

@@ -20,12 +20,14 @@ export interface Outline {
   `,
   styles: `
     :host {
+      position: relative;
       display: grid;
       place-items: center;
     }
 
     svg {
-      display: block;
+      position: absolute;
+      inset: 0;
       width: 100%;
       height: 100%;
       overflow: visible;

@@ -1,6 +1,6 @@
 import { computed, inject, Injectable, linkedSignal, signal } from '@angular/core';
 import type { Part } from '@shared/contracts/parts';
-import type { PartDocument, Unit } from '@shared/part/document';
+import { isJoggle, isLeg, type PartDocument, type Unit } from '@shared/part/document';
 import type { SolveResult, Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { convertLength } from '@shared/units/length';
@@ -32,14 +32,24 @@ export class PartEditor {
   readonly mayEdit = signal(false);
   readonly document = computed(() => this.history().present);
   readonly result = computed<SolveResult>(() => solve(this.document()));
-  /** The newest result with figures; while something typed is broken, that of before. */
-  readonly drawn = linkedSignal<SolveResult, Solved | null>({
-    source: this.result,
-    computation: (result, former) => (result.ok ? result : (former?.value ?? null)),
+  /** The newest result with figures; while something typed is broken, that of before, never that of another part. */
+  readonly drawn = linkedSignal<{ result: SolveResult; part: Part | null }, Solved | null>({
+    source: () => ({ result: this.result(), part: this.opened() }),
+    computation: ({ result, part }, former) => {
+      if (result.ok) return result;
+      return former && former.source.part === part ? former.value : (part?.revision.result ?? null);
+    },
   });
   readonly isCurrent = computed(() => this.result().ok);
   readonly canUndo = computed(() => this.mayEdit() && this.history().past.length > 0);
   readonly canRedo = computed(() => this.mayEdit() && this.history().future.length > 0);
+
+  readonly counts = computed(() => {
+    const { chain } = this.document();
+    const legs = chain.filter(isLeg).length;
+    const bends = chain.reduce((sum, entry) => sum + (isLeg(entry) ? 0 : isJoggle(entry) ? 2 : 1), 0);
+    return { legs, bends };
+  });
 
   /** What is wrong, by the path of the field; what the server found last, if we did not find it first. */
   readonly messages = computed<ReadonlyMap<string, string>>(() => {
@@ -117,6 +127,8 @@ export class PartEditor {
 
   private step(move: (history: History<PartDocument>) => History<PartDocument>): void {
     const before = this.document();
+    // Asked for now, so that there is something to show should the next document be broken.
+    this.drawn();
     this.history.update(move);
     if (this.document() !== before) this.tell();
   }

@@ -1,4 +1,4 @@
-import { needsReading, typedExpression } from './typed-expression';
+import { isFraction, needsReading, typedExpression } from './typed-expression';
 
 describe('a typed expression', () => {
   it('is a figure when it reads back the same', () => {
@@ -8,6 +8,14 @@ describe('a typed expression', () => {
 
   it('stays text when it does not', () => {
     for (const text of ['0.750', '1 3/16', 'W/2', 'abc', '', '1e3']) expect(typedExpression(text)).toBe(text);
+  });
+
+  it('is told from a fraction that is read at sight', () => {
+    expect(isFraction('5/32')).toBeTrue();
+    expect(isFraction('1 3/16')).toBeTrue();
+    expect(isFraction('W/2')).toBeFalse();
+    expect(isFraction('1/8 + 1/8')).toBeFalse();
+    expect(isFraction(0.5)).toBeFalse();
   });
 
   it('shows what it comes to unless that is plain', () => {

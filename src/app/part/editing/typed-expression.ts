@@ -10,6 +10,10 @@ export function typedExpression(text: string): Expression {
   return trimmed !== '' && Number.isFinite(value) && String(value) === trimmed ? value : trimmed;
 }
 
+/** Whether anybody in a shop reads it at sight: "1 3/16" is, "W/2" is not. */
+export const isFraction = (expression: Expression): boolean =>
+  typeof expression === 'string' && /^(?:\d+ )?\d+\/\d+$/.test(expression);
+
 /** Whether what it comes to is worth showing beside it. */
 export const needsReading = (expression: Expression): boolean =>
   typeof expression === 'string' && expression !== '' && !/^\d*\.?\d+$/.test(expression);

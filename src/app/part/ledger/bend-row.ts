@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { type Bend, isBend } from '@shared/part/document';
 import { removeBend, whyBendStays } from '@shared/part/edits/remove-bend';
@@ -8,7 +8,7 @@ import { setRadius } from '@shared/part/edits/set-radius';
 import { setTurn } from '@shared/part/edits/set-turn';
 import { PartEditor } from '../editing/part-editor';
 import { needsReading, typedExpression } from '../editing/typed-expression';
-import { betweenLegs } from '../words';
+import { between, betweenLegs } from '../words';
 import { ExpressionField } from './expression-field';
 import { TurnGlyph } from './turn-glyph';
 
@@ -22,6 +22,8 @@ import { TurnGlyph } from './turn-glyph';
 export class BendRow {
   readonly index = input.required<number>();
   readonly number = input.required<number>();
+  /** Another row is to be gone on with. */
+  readonly goOn = output();
 
   protected readonly editor = inject(PartEditor);
 
@@ -40,7 +42,11 @@ export class BendRow {
   });
   protected readonly between = computed(() => {
     const solved = this.solved();
-    return solved ? betweenLegs(solved.angle) : '';
+    return solved ? between(solved.angle) : '';
+  });
+  protected readonly says = computed(() => {
+    const solved = this.solved();
+    return [this.bend().name ?? '', solved ? betweenLegs(solved.angle) : ''].filter((words) => words !== '').join(', ');
   });
   protected readonly angleRead = computed(() => this.read(this.bend().bend, this.solved()?.angle, '°'));
   protected readonly radiusRead = computed(() => this.read(this.bend().radius, this.solved()?.radius, ''));
@@ -72,6 +78,7 @@ export class BendRow {
     const index = this.index();
     this.editor.apply((document) => removeBend(document, index));
     this.editor.select(index - 1);
+    this.goOn.emit();
   }
 
   private messageAt(field: string) {

@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, type ElementRef, input, output, viewChild } from '@angular/core';
 import type { Expression } from '@shared/part/document';
+import { isFraction } from '../editing/typed-expression';
 
 let count = 0;
 
@@ -18,7 +19,7 @@ let count = 0;
       [id]="id"
       [attr.aria-label]="label()"
       [attr.aria-invalid]="message() !== null"
-      [attr.aria-describedby]="message() ? id + '-message' : understood() ? id + '-understood' : null"
+      [attr.aria-describedby]="describedBy()"
       [attr.data-cell]="cell()"
       [readonly]="readOnly()"
       [value]="text()"
@@ -27,13 +28,13 @@ let count = 0;
       (blur)="done.emit()"
       (keydown.escape)="cancel($event)"
     />
-    @if (suffix()) {
+    @if (suffix() && !understood()) {
       <span class="suffix" aria-hidden="true">{{ suffix() }}</span>
     }
-    @if (message(); as words) {
-      <span class="message" role="alert" [id]="id + '-message'">{{ words }}</span>
-    } @else if (understood(); as reading) {
-      <span class="understood" [id]="id + '-understood'">= {{ reading }}</span>
+    @if (message() !== null && messageAt() === null) {
+      <span class="message" role="alert" [id]="id + '-message'">{{ message() }}</span>
+    } @else if (message() === null && understood() !== null) {
+      <span class="understood" [class.quiet]="quiet()" [id]="id + '-understood'">= {{ understood() }}</span>
     }
   `,
   styleUrl: './expression-field.scss',
@@ -44,6 +45,8 @@ export class ExpressionField {
   readonly value = input.required<Expression>();
   readonly label = input.required<string>();
   readonly message = input<string | null>(null);
+  /** Id of the element that shows the message, where there is no room for it under the box. */
+  readonly messageAt = input<string | null>(null);
   /** What an expression comes to; null when it says so itself. */
   readonly understood = input<string | null>(null);
   readonly suffix = input('');
@@ -56,6 +59,14 @@ export class ExpressionField {
 
   protected readonly id = `lw-expression-${++count}`;
   private readonly box = viewChild.required<ElementRef<HTMLInputElement>>('box');
+
+  /** A fraction is read at sight; what it comes to is shown while somebody is at it. */
+  protected readonly quiet = computed(() => isFraction(this.value()));
+
+  protected readonly describedBy = computed(() => {
+    if (this.message() !== null) return this.messageAt() ?? `${this.id}-message`;
+    return this.understood() === null ? null : `${this.id}-understood`;
+  });
 
   /** What stands in the box is left alone while it still means the same: "1." is on the way to "1.5". */
   protected readonly text = computed(() => String(this.value()));

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { isJoggle, type Joggle } from '@shared/part/document';
 import { removeBend, whyBendStays } from '@shared/part/edits/remove-bend';
@@ -19,6 +19,8 @@ import { ExpressionField } from './expression-field';
 export class JoggleRow {
   readonly index = input.required<number>();
   readonly number = input.required<number>();
+  /** Another row is to be gone on with. */
+  readonly goOn = output();
 
   protected readonly editor = inject(PartEditor);
   protected readonly fields = [
@@ -42,8 +44,7 @@ export class JoggleRow {
     const index = this.index();
     const value = typedExpression(text);
     this.editor.apply(
-      (document) =>
-        field === 'radius' ? setRadius(document, index, value) : setJoggle(document, index, field, value),
+      (document) => (field === 'radius' ? setRadius(document, index, value) : setJoggle(document, index, field, value)),
       `${field} ${index}`,
     );
   }
@@ -58,5 +59,6 @@ export class JoggleRow {
     const index = this.index();
     this.editor.apply((document) => removeBend(document, index));
     this.editor.select(index - 1);
+    this.goOn.emit();
   }
 }

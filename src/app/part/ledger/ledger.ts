@@ -1,7 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, ElementRef, inject } from '@angular/core';
+import {
+  afterNextRender,
+  afterRenderEffect,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  Injector,
+} from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { isBend, isJoggle, isLeg } from '@shared/part/document';
-import { commandOf } from '../editing/commands';
+import { type Command, commandOf } from '../editing/commands';
 import { PartEditor } from '../editing/part-editor';
 import { BendRow } from './bend-row';
 import { JoggleRow } from './joggle-row';
@@ -11,6 +20,8 @@ type Row =
   | { readonly kind: 'leg'; readonly index: number; readonly number: number }
   | { readonly kind: 'bend' | 'joggle'; readonly index: number; readonly number: number };
 
+const VALUE = 'input[data-cell="value"]';
+
 /** The chain as a list: leg, bend, leg, …; typed straight down with the keyboard alone. */
 @Component({
   selector: 'lw-ledger',
@@ -18,10 +29,12 @@ type Row =
   templateUrl: './ledger.html',
   styleUrl: './ledger.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(focusin)': 'select($event)', '(click)': 'select($event)' },
 })
 export class Ledger {
   protected readonly editor = inject(PartEditor);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+  private readonly injector = inject(Injector);
 
   protected readonly addAtStart = commandOf('add-at-start');
   protected readonly addAtEnd = commandOf('add-at-end');
@@ -38,7 +51,23 @@ export class Ledger {
     });
   });
 
-  protected focusedRow(event: FocusEvent): void {
+  constructor() {
+    afterRenderEffect({ write: () => this.bringIntoView(this.editor.selection()) });
+  }
+
+  protected add(command: Command): void {
+    command.run(this.editor);
+    this.goOn();
+  }
+
+  /** The box that was in use is gone or done with: on in the row that is selected now. */
+  protected goOn(): void {
+    const focus = (): void => this.rowAt(this.editor.selection())?.querySelector<HTMLInputElement>(VALUE)?.focus();
+    afterNextRender({ read: focus }, { injector: this.injector });
+  }
+
+  /** Whatever is clicked or comes into focus selects its row. */
+  protected select(event: Event): void {
     const row = event.target instanceof Element ? event.target.closest('[data-row]') : null;
     if (row) this.editor.select(Number(row.getAttribute('data-row')));
   }
@@ -53,6 +82,20 @@ export class Ledger {
     if (down || event.key === 'ArrowUp') this.go(event, target, column, down ? 1 : -1);
     else if (event.key === 'Enter') this.go(event, target, 'value', event.shiftKey ? -1 : 1);
     else if (event.key === 'Tab' && !event.shiftKey) this.tab(event, target);
+  }
+
+  private rowAt(index: number | null): HTMLElement | null {
+    return index === null ? null : this.host.nativeElement.querySelector(`[data-row="${index}"]`);
+  }
+
+  /** A bend picked in a drawing is shown in its row: by scrolling the ledger in its frame, never the page. */
+  private bringIntoView(index: number | null): void {
+    const row = this.rowAt(index);
+    const frame = this.host.nativeElement.parentElement;
+    if (!row || !frame || frame.scrollHeight <= frame.clientHeight) return;
+    const [inner, outer] = [row.getBoundingClientRect(), frame.getBoundingClientRect()];
+    if (inner.top < outer.top) frame.scrollTop -= outer.top - inner.top;
+    else if (inner.bottom > outer.bottom) frame.scrollTop += inner.bottom - outer.bottom;
   }
 
   /** Within a row Tab does what it does anywhere; from its last figure it goes down, past the choices beside it. */

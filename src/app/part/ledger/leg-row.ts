@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { type ChainEntry, isLeg, type Leg, type Measure } from '@shared/part/document';
 import { setLegDimension } from '@shared/part/edits/set-leg-dimension';
@@ -20,6 +20,8 @@ import { ExpressionField } from './expression-field';
 export class LegRow {
   readonly index = input.required<number>();
   readonly number = input.required<number>();
+  /** Another row is to be gone on with. */
+  readonly goOn = output();
 
   protected readonly editor = inject(PartEditor);
   protected readonly measures = MEASURES;
@@ -62,6 +64,11 @@ export class LegRow {
   protected rename(name: string): void {
     const index = this.index();
     this.editor.apply((document) => setName(document, index, name), `name ${index}`);
+  }
+
+  protected insertAfter(): void {
+    this.insert.run(this.editor);
+    this.goOn.emit();
   }
 
   protected measure(value: string): void {

@@ -23,7 +23,5 @@ import type { Turn } from '@shared/part/document';
 })
 export class TurnGlyph {
   readonly turn = input.required<Turn>();
-  protected readonly path = computed(() =>
-    this.turn() === 'up' ? 'M2 15h8c3 0 5-2 5-5V2' : 'M2 3h8c3 0 5 2 5 5v8',
-  );
+  protected readonly path = computed(() => (this.turn() === 'up' ? 'M2 15h8c3 0 5-2 5-5V2' : 'M2 3h8c3 0 5 2 5 5v8'));
 }

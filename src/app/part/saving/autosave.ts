@@ -6,7 +6,7 @@ import type { PartDocument } from '@shared/part/document';
 import { fromEvent, Subject, switchMap, timer } from 'rxjs';
 import { Server } from '../../server/server';
 import { ServerProblem } from '../../server/server-problem';
-import { LocalCopies } from './local-copies';
+import { LocalCopies, type LocalCopy } from './local-copies';
 import type { SaveState } from './save-state';
 
 const QUIET = 800;
@@ -25,6 +25,7 @@ export class Autosave {
   private readonly server = inject(Server);
   private readonly copies = inject(LocalCopies);
   private readonly current = signal<SaveState>({ is: 'saved', at: null });
+  private readonly found = signal<LocalCopy | null>(null);
   private readonly due = new Subject<number>();
 
   private target: Target | null = null;
@@ -36,6 +37,8 @@ export class Autosave {
   private kept = true;
 
   readonly state = this.current.asReadonly();
+  /** A copy of work that an earlier visit could not save, when it differs from what the server has. */
+  readonly leftBehind = this.found.asReadonly();
 
   constructor() {
     const window = inject(DOCUMENT).defaultView;
@@ -63,6 +66,13 @@ export class Autosave {
     this.target = { person, id: part.id, letter: part.revision.letter };
     this.follow(part.revision);
     this.current.set({ is: 'saved', at: new Date(part.revision.changedAt) });
+    this.lookForCopy(part, person);
+  }
+
+  /** The work of an earlier visit has been taken up again or given up. */
+  settleCopy(): void {
+    this.found.set(null);
+    if (this.target) this.copies.dropAside(this.target.person, this.target.id, this.target.letter);
   }
 
   /** @param refused number of fields that the engine refuses */
@@ -104,6 +114,15 @@ export class Autosave {
     this.version = theirs.version;
     this.current.set({ is: 'waiting' });
     this.due.next(0);
+  }
+
+  private lookForCopy({ id, revision }: Part, person: string): void {
+    const copy = this.copies.read(person, id, revision.letter);
+    const differs = copy !== null && JSON.stringify(copy.document) !== JSON.stringify(revision.document);
+    this.found.set(differs ? copy : null);
+    if (differs) this.copies.setAside(person, id, revision.letter, copy);
+    else this.copies.dropAside(person, id, revision.letter);
+    this.dropCopy();
   }
 
   private follow(revision: Revision): void {

@@ -11,6 +11,8 @@ export interface LocalCopy {
 
 const key = (person: string, part: string, letter: string): string => `lw-draft/${person}/${part}/${letter}`;
 
+const ASIDE = '/before';
+
 @Injectable({ providedIn: 'root' })
 export class LocalCopies {
   private readonly storage = inject(DOCUMENT).defaultView;
@@ -25,9 +27,32 @@ export class LocalCopies {
     }
   }
 
+  /** The newest copy, also one that was set aside. */
   read(person: string, part: string, letter: string): LocalCopy | null {
+    const name = key(person, part, letter);
+    return this.at(name) ?? this.at(`${name}${ASIDE}`);
+  }
+
+  /** Makes way for new work while nobody has said what becomes of the old. */
+  setAside(person: string, part: string, letter: string, copy: LocalCopy): void {
     try {
-      const text = this.storage?.localStorage.getItem(key(person, part, letter)) ?? null;
+      this.storage?.localStorage.setItem(`${key(person, part, letter)}${ASIDE}`, JSON.stringify(copy));
+    } catch {
+      // The first copy still stands until new work replaces it.
+    }
+  }
+
+  drop(person: string, part: string, letter: string): void {
+    this.remove(key(person, part, letter));
+  }
+
+  dropAside(person: string, part: string, letter: string): void {
+    this.remove(`${key(person, part, letter)}${ASIDE}`);
+  }
+
+  private at(name: string): LocalCopy | null {
+    try {
+      const text = this.storage?.localStorage.getItem(name) ?? null;
       const copy: unknown = text === null ? null : JSON.parse(text);
       return isCopy(copy) ? copy : null;
     } catch {
@@ -35,9 +60,9 @@ export class LocalCopies {
     }
   }
 
-  drop(person: string, part: string, letter: string): void {
+  private remove(name: string): void {
     try {
-      this.storage?.localStorage.removeItem(key(person, part, letter));
+      this.storage?.localStorage.removeItem(name);
     } catch {
       // What could not be written need not be removed.
     }

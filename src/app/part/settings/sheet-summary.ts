@@ -1,0 +1,30 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { PartEditor } from '../editing/part-editor';
+import { METHOD_WORDS } from '../words';
+
+/** The sheet in a line: "0.040 in 2024-T3 · 6 in wide · grain across · handbook". */
+@Component({
+  selector: 'lw-sheet-summary',
+  template: '<b>Sheet</b> {{ words() }}',
+  styles: `
+    b {
+      font-weight: 600;
+      color: var(--lw-ink);
+    }
+  `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class SheetSummary {
+  private readonly editor = inject(PartEditor);
+
+  protected readonly words = computed(() => {
+    const { unit, thickness, material, width, grain, allowance } = this.editor.document();
+    const name = typeof material === 'object' ? material.name : (material ?? 'material not said');
+    return [
+      `${thickness} ${unit} ${name}`,
+      width === undefined ? 'width not said' : `${width} ${unit} wide`,
+      grain === undefined ? 'grain not known' : `grain ${grain}`,
+      METHOD_WORDS[allowance.method],
+    ].join(' · ');
+  });
+}
