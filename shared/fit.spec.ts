@@ -1,4 +1,4 @@
-import { fit, Giving, Held } from './fit';
+import { fit, type Giving, type Held } from './fit';
 import type { PartDocument } from './part/document';
 import { solve } from './solve';
 

@@ -1,4 +1,4 @@
-import { Browser, BrowserContext, chromium, Page } from 'playwright-core';
+import { type Browser, type BrowserContext, chromium, type Page } from 'playwright-core';
 
 /** As root in a closed network: no sandbox, and no calls home that would be refused one by one. */
 const FLAGS = [

@@ -1,5 +1,5 @@
 import { fallsShort } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 import { rulingRadius } from './ruling-radius';
 
 /**

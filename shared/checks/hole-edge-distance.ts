@@ -1,5 +1,5 @@
 import { fallsShort } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** A hole too near a free edge of the blank. One finding a hole or row, at its nearest. Source: AC 43.13-1B ch. 4, edge distance. */
 export const holeEdgeDistance: Check = ({ figures, layout, holes, rules }) => {

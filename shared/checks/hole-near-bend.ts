@@ -1,5 +1,5 @@
 import { fallsShort } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** A hole so near a bend that it would be pulled oval. One finding a hole or row. Common practice, no source. */
 export const holeNearBend: Check = ({ figures, layout, holes, rules }) => {

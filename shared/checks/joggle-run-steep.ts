@@ -1,5 +1,5 @@
 import { fallsShort } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** A joggle that steps faster than shops like to form it. Common practice, no source. */
 export const joggleRunSteep: Check = ({ figures, layout, rules }) =>

@@ -1,4 +1,4 @@
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** A joggle whose two bends don't fit into its run. Source: geometry. */
 export const joggleRunTooShort: Check = ({ figures, layout }) =>

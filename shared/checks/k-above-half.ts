@@ -1,5 +1,5 @@
 import { exceeds } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** Methods whose K a person answers for. */
 const GIVEN = new Set(['k-factor', 'shop', 'measured']);

@@ -1,4 +1,4 @@
-import { Check, legName, shown } from './check';
+import { type Check, legName, shown } from './check';
 
 /** The bends at a leg's ends take more than the leg: flat ≤ 0. Source: geometry. */
 export const legConsumed: Check = ({ figures, layout }) =>

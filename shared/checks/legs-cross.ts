@@ -1,4 +1,4 @@
-import { Check, legName } from './check';
+import { type Check, legName } from './check';
 
 /** The formed part runs into itself. Source: geometry. */
 export const legsCross: Check = ({ figures, crossings }) =>

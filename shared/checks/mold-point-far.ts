@@ -1,5 +1,5 @@
 import { exceeds } from '../geometry/tolerance';
-import { Check, legName, shown } from './check';
+import { type Check, legName, shown } from './check';
 
 /** A closed bend whose mold point lies off the shorter of its legs: nobody can measure to it. Source: geometry. */
 export const moldPointFar: Check = ({ figures, layout }) =>

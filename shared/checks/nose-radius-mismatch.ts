@@ -1,5 +1,5 @@
 import { exceeds } from '../geometry/tolerance';
-import { Check, shown } from './check';
+import { type Check, shown } from './check';
 
 /** A nose chosen for a bend that is not the one that springs back to its radius. Common practice, no source. */
 export const noseRadiusMismatch: Check = ({ figures, layout, rules }) =>

@@ -1,4 +1,4 @@
-import { MinimumRadius, minimumRadii } from '../reference/minimum-radii';
+import { type MinimumRadius, minimumRadii } from '../reference/minimum-radii';
 import { convertLength } from '../units/length';
 import type { CheckInput } from './check';
 import { shown } from './check';

@@ -1,5 +1,5 @@
 /** Where the formed part runs into itself. */
-import { Curve, distance, ends, segment } from '../geometry/curve';
+import { type Curve, distance, ends, segment } from '../geometry/curve';
 import { direction } from '../geometry/direction';
 import { isReturnBend, TOUCHING } from '../geometry/tolerance';
 import type { XY } from '../result';

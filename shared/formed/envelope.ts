@@ -1,4 +1,4 @@
-import { arcPoint, Curve, covers, ends } from '../geometry/curve';
+import { arcPoint, type Curve, covers, ends } from '../geometry/curve';
 import { direction } from '../geometry/direction';
 import { exceeds } from '../geometry/tolerance';
 import type { LegResult, XY } from '../result';

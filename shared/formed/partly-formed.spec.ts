@@ -1,8 +1,8 @@
 import { layOut } from '../layout/lay-out';
 import type { PartDocument } from '../part/document';
 import { evaluateDocument } from '../part/evaluate';
-import { partlyFormed, Progress } from './partly-formed';
-import { formSolids, Solid } from './solid';
+import { partlyFormed, type Progress } from './partly-formed';
+import { formSolids, type Solid } from './solid';
 import { extent } from './envelope';
 import { sides } from './faces';
 

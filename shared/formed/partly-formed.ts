@@ -1,6 +1,6 @@
 import type { Piece } from '../layout/lay-out';
 import type { BendResult } from '../result';
-import { formSolids, Solid } from './solid';
+import { formSolids, type Solid } from './solid';
 
 /** How far the part has come: the bends done, and at most one on its way. */
 export interface Progress {

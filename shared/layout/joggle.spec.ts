@@ -91,6 +91,17 @@ describe('A joggle', () => {
   });
 });
 
+describe('A joggle a hair longer than its shortest run, in a long part', () => {
+  it('has next to no straight, and its two bends still do not cross each other', () => {
+    const run = Math.sqrt(2 * 0.5 * 0.08 - 0.08 * 0.08) * (1 + 1e-12);
+    const chain = [{ leg: 5000 }, { joggle: 0.08, run, turn: 'up', radius: 0.2 }, { leg: 1 }];
+    const solved = figuresOf(partOf(chain, { thickness: 0.1 }));
+    expect(solved.joggles[0]!.straight!).toBeGreaterThan(0);
+    expect(solved.joggles[0]!.straight!).toBeLessThan(1e-6);
+    expect(codesOf(solved)).not.toContain('legs-cross');
+  });
+});
+
 describe('A joggle in the layout', () => {
   const chain = [{ leg: 1 }, { joggle: 0.04, run: 0.25, turn: 'down', radius: 0.125 }, { leg: 2, measure: 'inside' }];
 

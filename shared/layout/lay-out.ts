@@ -5,7 +5,7 @@ import type { FigureLeg, Joint, PartFigures } from '../part/figures';
 import type { Measure, Turn } from '../part/document';
 import type { BendResult, JoggleResult, LegResult } from '../result';
 import { gardiner } from '../springback/gardiner';
-import { joggle, JoggleShape } from './joggle';
+import { joggle, type JoggleShape } from './joggle';
 import { setback } from './setback';
 
 /** A piece of the blank, in order: what the formed shape and the section are built from. */

@@ -1,7 +1,7 @@
 import type { Allowance, PartDocument } from '../part/document';
 import type { Solved } from '../result';
 import { solve } from '../solve';
-import { workingOf, WorkLine } from './working';
+import { workingOf, type WorkLine } from './working';
 
 const DOCUMENT: PartDocument = {
   format: 'leafwright/1',

@@ -173,7 +173,7 @@ function moldLineLengths({ legs, bends, joggles }: Solved): readonly number[] | 
   legs.forEach((leg, i) => {
     flats.push(leg.flat);
     const joggle = joggles.find((candidate) => candidate.chain === leg.chain + 1);
-    if (i < legs.length - 1 && joggle?.straight != null) flats.push(joggle.straight);
+    if (i < legs.length - 1 && typeof joggle?.straight === 'number') flats.push(joggle.straight);
   });
   return flats.map((flat, i) => flat + (bends[i - 1]?.setback ?? 0) + (bends[i]?.setback ?? 0));
 }

@@ -1,6 +1,6 @@
 /** Reads one expression field after another and collects what is wrong, so that a document is refused once, with everything. */
 import type { FieldError } from '../result';
-import { evaluate, Scope } from '../units/expression';
+import { evaluate, type Scope } from '../units/expression';
 import { convertLength } from '../units/length';
 import type { Dimension } from '../units/quantity';
 import type { Expression, Unit } from './document';

@@ -1,4 +1,4 @@
-import { ChainEntry, isBend, isJoggle, isLeg } from './document';
+import { type ChainEntry, isBend, isJoggle, isLeg } from './document';
 
 /**
  * Gives the entries of a new chain what the old one knew of them beyond their figures: ids, names, allowances, noses.

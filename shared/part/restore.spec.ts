@@ -182,6 +182,21 @@ describe('restore', () => {
       expect(row(count)).withContext(String(count)).toEqual(['holes/0/count']);
   });
 
+  it('takes 2000 holes in all, rows spread out, and refuses 2001', () => {
+    const row = { leg: 0, diameter: 0.1, from: 'start', at: 0, across: 0, count: 1000, pitch: 1 };
+    expect(pathsOf(withField('holes', [row, { ...row, count: 999 }, { ...row, count: undefined }]))).toEqual([]);
+    expect(pathsOf(withField('holes', [row, row, { ...row, count: 1 }]))).toEqual(['holes']);
+  });
+
+  it('takes 200,000 characters of variables, names included, and refuses one more', () => {
+    const variables = (last: string): object => ({
+      ...Object.fromEntries(Array.from({ length: 19_999 }, (_, i) => [`v${i + 10_000}`, '1+1+'])),
+      v99999: last,
+    });
+    expect(pathsOf(withField('variables', variables('1+1+')))).toEqual([]);
+    expect(pathsOf(withField('variables', variables('1+1+1')))).toEqual(['variables']);
+  });
+
   it('gives 50 errors at most', () => {
     const broken = Array.from({ length: 201 }, () => ({ leg: null }));
     expect(pathsOf(partOf(broken)).length).toBe(50);

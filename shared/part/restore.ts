@@ -1,5 +1,5 @@
 /** The one gate for documents from outside: storage, files, requests, the clipboard. */
-import * as z from 'zod';
+import type * as z from 'zod';
 import type { FieldError, Refused } from '../result';
 import type { PartDocument } from './document';
 import { expectedAt } from './expected';
@@ -8,6 +8,10 @@ import { bendSchema, frameSchema, joggleSchema, legSchema } from './schema';
 export const MOST_BENDS = 200;
 /** A chain of 200 bends has 401 entries; a longer list is refused before it is read. */
 const LONGEST_CHAIN = 2 * MOST_BENDS + 1;
+/** Rows spread out: more would be a sieve, and its result too large to keep. */
+const MOST_HOLES = 2000;
+/** All variables together: past this no person wrote them, and working them out would keep others waiting. */
+const VARIABLES_LENGTH = 200_000;
 const MOST_ERRORS = 50;
 
 export type Restored = { readonly ok: true; readonly document: PartDocument } | Refused;
@@ -37,8 +41,8 @@ export function restore(value: unknown): Restored {
   errors.push(...chainErrors(chain));
   if (errors.length > 0) return refused(errors);
   const document = { ...framed.data, chain } as PartDocument;
-  const doubled = doubledIds(document);
-  return doubled.length > 0 ? refused(doubled) : { ok: true, document };
+  const rest = [...doubledIds(document), ...sizeErrors(document)];
+  return rest.length > 0 ? refused(rest) : { ok: true, document };
 }
 
 /** The schema's reading of a record drops this name without a word, so it is refused before. */
@@ -118,6 +122,18 @@ function worded(error: z.ZodError, base: readonly PropertyKey[]): FieldError[] {
 }
 
 const pathOf = (path: readonly PropertyKey[]): string => path.map(String).join('/');
+
+function sizeErrors({ holes = [], variables = {} }: PartDocument): FieldError[] {
+  const errors: FieldError[] = [];
+  const spread = holes.reduce((sum, hole) => sum + (hole.count ?? 1), 0);
+  if (spread > MOST_HOLES)
+    errors.push({ path: 'holes', message: `A part has ${MOST_HOLES} holes at most; this one has ${spread}.` });
+  const length = Object.entries(variables).reduce((sum, [name, value]) => sum + name.length + String(value).length, 0);
+  if (length > VARIABLES_LENGTH) {
+    errors.push({ path: 'variables', message: `All variables together have ${VARIABLES_LENGTH} characters at most.` });
+  }
+  return errors;
+}
 
 function doubledIds(document: PartDocument): FieldError[] {
   const seen = new Set<string>();

@@ -9,9 +9,9 @@
 import { compile } from '../units/expression';
 import { FUNCTIONS } from '../units/functions';
 import { ANGLE_UNITS, LENGTH_UNITS } from '../units/length';
-import { ChainEntry, Expression, isBend, isLeg, Leg, Measure, Turn } from './document';
+import { type ChainEntry, type Expression, isBend, isLeg, type Leg, type Measure, type Turn } from './document';
 import { keepFrom } from './keep-from';
-import { MEASURE_WORDS, splitFirst, unwrap, Word, wordsOf, wrap } from './typed-words';
+import { MEASURE_WORDS, splitFirst, unwrap, type Word, wordsOf, wrap } from './typed-words';
 
 export interface TypedError {
   readonly start: number;

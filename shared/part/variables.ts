@@ -1,6 +1,6 @@
 /** The variables of a part, each evaluated once, whatever order they stand in. */
 import type { FieldError } from '../result';
-import { compile, Compiled, Scope } from '../units/expression';
+import { compile, type Compiled, type Scope } from '../units/expression';
 import type { Quantity } from '../units/quantity';
 import type { Expression, Unit } from './document';
 

@@ -43,7 +43,7 @@ export type ShopContext = z.infer<typeof shopContextSchema>;
 /** A shop's choices with the defaults of those it left open. */
 export interface ShopRules {
   readonly radiusRule: NonNullable<ShopContext['radiusRule']>;
-  readonly limits: { readonly [K in keyof typeof COMMON_PRACTICE | 'holeEdge']: number };
+  readonly limits: Readonly<Record<keyof typeof COMMON_PRACTICE | 'holeEdge', number>>;
 }
 
 export type RestoredShop =

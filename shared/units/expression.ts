@@ -1,11 +1,11 @@
 /** Expressions: what a person may type where a figure is wanted. Arithmetic only; nothing here can call or assign. */
-import { create, FactoryFunctionMap, MathNode, parseDependencies } from 'mathjs/number';
+import { create, type FactoryFunctionMap, type MathNode, parseDependencies } from 'mathjs/number';
 import type { Expression, Unit } from '../part/document';
 import { FUNCTIONS } from './functions';
 import { MM_PER_INCH } from './length';
-import { bare, Dimension, ExpressionProblem, figureFor, product, Quantity, quotient, sum } from './quantity';
-import { Place, rewrite } from './rewrite';
-import { LexError, tokenize } from './tokens';
+import { bare, type Dimension, ExpressionProblem, figureFor, product, type Quantity, quotient, sum } from './quantity';
+import { type Place, rewrite } from './rewrite';
+import { type LexError, tokenize } from './tokens';
 
 /** Longest expression that is read at all. */
 export const EXPRESSION_LENGTH = 500;

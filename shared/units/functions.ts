@@ -1,5 +1,5 @@
 /** The functions that an expression may use; angles go in and come out in degrees. */
-import { bare, ExpressionProblem, Quantity, shared } from './quantity';
+import { bare, ExpressionProblem, type Quantity, shared } from './quantity';
 
 const DEGREE = Math.PI / 180;
 

@@ -3,8 +3,8 @@
  * figures, shop mixed numbers and figures with units each become one place `q0`, `q1`, …
  */
 import { ANGLE_UNITS, LENGTH_UNITS } from './length';
-import { angleOf, bare, lengthOf, Quantity } from './quantity';
-import { FigureToken, LexError, Token } from './tokens';
+import { angleOf, bare, lengthOf, type Quantity } from './quantity';
+import { type FigureToken, type LexError, type Token } from './tokens';
 
 /** What a place name stands for. */
 export type Place = { readonly quantity: Quantity } | { readonly variable: string };

@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
-import { Import, importsOf, ROOT, sourceFiles } from './source-files';
+import { type Import, importsOf, ROOT, sourceFiles } from './source-files';
 
 const room = (path: string): string => path.split('/')[0]!;
 

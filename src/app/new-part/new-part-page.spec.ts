@@ -110,12 +110,15 @@ describe('NewPartPage', () => {
     await type('Part number', 'LW-9');
     await type('Title', 'Channel');
     await make();
-    const detail = 'There is a part LW-9 already.';
+    const message = 'There is a part LW-9 already.';
     backend
       .expectOne('/api/parts')
-      .flush({ type: PROBLEM.taken, title: 'Taken', status: 409, detail }, { status: 409, statusText: '' });
+      .flush(
+        { type: PROBLEM.taken, title: 'Taken', status: 409, errors: [{ path: 'number', message }] },
+        { status: 409, statusText: '' },
+      );
     await settle();
-    expect(await (await field('Part number')).getTextErrors()).toEqual([detail]);
+    expect(await (await field('Part number')).getTextErrors()).toEqual([message]);
     await type('Part number', 'LW-10');
     expect(await (await field('Part number')).hasErrors()).toBeFalse();
   });
@@ -133,7 +136,7 @@ describe('NewPartPage', () => {
 
   it('points at the word of a typed chain', async () => {
     await open();
-    await toggle('A typed chain');
+    await toggle('Typed chain');
     await type('Typed chain', '1 upp 90 r.16 2');
     expect(element().querySelector('mark')?.textContent).toBe('upp');
     await type('Typed chain', '1 up 90 r.16 2 up 90 1');
@@ -152,7 +155,7 @@ describe('NewPartPage', () => {
   it('takes up what was typed before a reload', async () => {
     await open();
     await type('Title', 'Half done');
-    await toggle('A typed chain');
+    await toggle('Typed chain');
     await type('Typed chain', '1 up');
     fixture.destroy();
     await open();
@@ -164,7 +167,7 @@ describe('NewPartPage', () => {
     await open();
     await type('Part number', 'LW-9');
     await type('Title', 'Channel');
-    await toggle('A part document');
+    await toggle('Part document');
     await make();
     expect(element().textContent).toContain('Choose a part document first.');
   });

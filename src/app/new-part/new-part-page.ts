@@ -136,14 +136,9 @@ export class NewPartPage {
       );
       return;
     }
-    if (error.is('taken')) {
-      this.refused.set({ number: error.message });
-      this.form.controls.number.markAsTouched();
-      this.trouble.set(error.message);
-      return;
-    }
     const fields = error.errors.map(({ path, message }) => [path, message] as const);
     this.refused.set(Object.fromEntries(fields));
+    this.form.markAllAsTouched();
     this.trouble.set(fields.length === 0 ? error.message : fields.map(([, message]) => message).join(' '));
   }
 }

@@ -67,7 +67,7 @@ export class Register {
   protected readonly narrowed = computed(() => Boolean(this.search() || this.material() || this.chosenUnit()));
   protected readonly narrow = toSignal(
     inject(BreakpointObserver)
-      .observe('(max-width: 767px)')
+      .observe('(max-width: 899px)')
       .pipe(map((state) => state.matches)),
     { initialValue: false },
   );

@@ -193,6 +193,18 @@ describe('autosave', () => {
     expect(autosave.leftBehind()).toBeNull();
   });
 
+  it('sends what the part before still wanted when another one is opened, and keeps the two apart', () => {
+    edit(thicker(0.05));
+    autosave.open({ ...part(), id: 'p2' }, 'me');
+    expect(sent[0]?.save).toEqual({ version: 1, document: thicker(0.05) });
+    expect(autosave.state().is).toBe('saved');
+    confirm(0, 9);
+    expect(copies.read('me', 'p1', 'A')).toBeNull();
+    edit(thicker(0.07));
+    wait(900);
+    expect(sent[1]?.save).toEqual({ version: 1, document: thicker(0.07) });
+  });
+
   it('is saved again when everything is undone before it was sent', () => {
     edit(thicker(0.05));
     edit(part().revision.document);

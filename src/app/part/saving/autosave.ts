@@ -63,6 +63,10 @@ export class Autosave {
   }
 
   open(part: Part, person: string): void {
+    // What the part before still wanted is sent on its own account.
+    this.send();
+    this.underway = false;
+    this.failures = 0;
     this.target = { person, id: part.id, letter: part.revision.letter };
     this.follow(part.revision);
     this.current.set({ is: 'saved', at: new Date(part.revision.changedAt) });
@@ -139,8 +143,14 @@ export class Autosave {
     this.underway = true;
     this.current.set({ is: 'saving' });
     this.server.saveRevision(target.id, target.letter, { version: this.version, document }).subscribe({
-      next: (revision) => this.saved(document, revision),
-      error: (error: unknown) => this.failed(error),
+      next: (revision) => {
+        if (this.target === target) this.saved(document, revision);
+        else this.copies.drop(target.person, target.id, target.letter);
+      },
+      error: (error: unknown) => {
+        // The local copy of a part that is no longer open is offered when it is opened again.
+        if (this.target === target) this.failed(error);
+      },
     });
   }
 
