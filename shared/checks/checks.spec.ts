@@ -168,6 +168,8 @@ describe('hole-edge-distance and hole-near-bend', () => {
     // The flat of leg 0 is 1.8; half a diameter and 1.5 T make 0.11.
     expect(found('hole-near-bend', { at: 1.69 })).toEqual([]);
     expect(levelsOf(found('hole-near-bend', { at: 1.6901 }))).toEqual(['caution']);
+    expect(found('hole-near-bend', { leg: 1, at: 0.1101 })).toEqual([]);
+    expect(levelsOf(found('hole-near-bend', { leg: 1, at: 0.1099 }))).toEqual(['caution']);
     expect(found('hole-near-bend', { at: 1.8 })[0]!.message).toContain('runs into a bend');
   });
 
