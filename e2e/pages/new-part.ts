@@ -10,8 +10,8 @@ export class NewPart {
   }
 
   async call(number: string, title: string): Promise<void> {
-    await this.page.getByLabel('Part number').fill(number);
-    await this.page.getByLabel('Title').fill(title);
+    await this.page.getByRole('textbox', { name: 'Part number' }).fill(number);
+    await this.page.getByRole('textbox', { name: 'Title' }).fill(title);
   }
 
   async typeChain(chain: string): Promise<void> {
@@ -21,7 +21,8 @@ export class NewPart {
 
   async chooseSection(name: string): Promise<void> {
     await this.page.getByRole('radio', { name: 'Section', exact: true }).click();
-    await this.page.getByRole('radio', { name, exact: true }).click();
+    // The pictures are labels over hidden radio buttons: a person clicks the picture.
+    await this.page.getByText(name, { exact: true }).click();
   }
 
   async setThickness(thickness: string): Promise<void> {

@@ -33,13 +33,27 @@ export class Part {
     return this.page.getByRole('textbox', { name: 'Typed chain' });
   }
 
+  /** Waits until the typed chain shows this. */
+  async chainReads(chain: string): Promise<void> {
+    const box = await this.chain().elementHandle();
+    await this.page.waitForFunction(([area, text]) => (area as HTMLTextAreaElement).value === text, [
+      box,
+      chain,
+    ] as const);
+  }
+
   /** The strip of figures, as a person reads it. */
   async figures(): Promise<string> {
     return (await this.page.locator('lw-figures-strip').innerText()).replace(/\s+/g, ' ');
   }
 
+  /** Waits until the strip shows a figure. */
+  async figuresShow(figure: string): Promise<void> {
+    await this.page.locator('lw-figures-strip').filter({ hasText: figure }).waitFor();
+  }
+
   async stations(): Promise<string> {
-    return (await this.page.getByRole('region', { name: 'Stations' }).innerText()).replace(/\s+/g, ' ');
+    return (await this.page.getByRole('region', { name: 'Table of stations' }).innerText()).replace(/\s+/g, ' ');
   }
 
   /** What the blank deck says in writing: legs with their flats, lines with their stations. */
