@@ -45,8 +45,12 @@ async function* linesOf(stream: NodeJS.ReadStream & { readonly fd: number }): As
   if (fstatSync(stream.fd).isDirectory()) throw new Error('it is a directory.');
   stream.setEncoding('utf8');
   let rest = '';
+  let begun = false;
   for await (const chunk of stream as AsyncIterable<string>) {
-    const lines = (rest + chunk).split(/\r?\n/);
+    // Editors on some systems put a byte-order mark first; it is no part of the document.
+    const text = begun ? chunk : chunk.replace(/^\uFEFF/, '');
+    begun = true;
+    const lines = (rest + text).split(/\r?\n/);
     rest = lines.pop() ?? '';
     yield* lines;
   }

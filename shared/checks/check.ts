@@ -20,5 +20,12 @@ export function legName(name: string | null, index: number): string {
   return name === null || name.trim() === '' ? `Leg ${index + 1}` : name.trim();
 }
 
+/** A least figure in a sentence: rounded up, so that typing it back satisfies the check. @example leastShown(0.165) // '0.165' */
+export function leastShown(value: number): string {
+  if (value === 0) return '0';
+  const unit = 10 ** (Math.floor(Math.log10(Math.abs(value))) - 4);
+  return shown(Math.ceil(value / unit - 1e-9) * unit);
+}
+
 /** Figures in sentences: enough digits to act on, no more. */
 export const shown = (value: number): string => String(Number(value.toPrecision(5)));

@@ -55,7 +55,7 @@ describe('grain-along-bend', () => {
   });
 
   it('is a note where every radius meets the along-grain figure', () => {
-    // 2024-T3 at 0.040 reads 3 T in the 0.064 column; along the grain 1.5 times that, 0.18.
+    // 2024-T3 at 0.040 reads 4 T in the stricter table; along the grain 1.5 times that, 0.24.
     const along = (radius: number) =>
       levelsOf(
         findingsOf('grain-along-bend', [{ leg: 2 }, bendUp(90, radius), { leg: 2 }], {
@@ -63,8 +63,8 @@ describe('grain-along-bend', () => {
           material: '2024-T3',
         }),
       );
-    expect(along(0.18)).toEqual(['note']);
-    expect(along(0.1799)).toEqual(['caution']);
+    expect(along(0.24)).toEqual(['note']);
+    expect(along(0.2399)).toEqual(['caution']);
   });
 });
 
@@ -77,32 +77,41 @@ describe('radius-below-minimum', () => {
       shop,
     );
 
-  it('by default goes by AC 43.13-1B: a caution below the range, a note inside it, nothing above', () => {
-    expect(levelsOf(at(0.1199))).toEqual(['caution']);
-    expect(levelsOf(at(0.12))).toEqual(['note']);
-    expect(levelsOf(at(0.1999))).toEqual(['note']);
-    expect(at(0.2)).toEqual([]);
-    expect(at(0.1199)[0]!.source).toContain('AC 43.13-1B');
+  it('goes by AC 43.13-1B where the shop says so: a caution below the range, a note inside it, nothing above', () => {
+    const shop = { radiusRule: 'AC 43.13-1B' };
+    expect(levelsOf(at(0.1199, {}, shop))).toEqual(['caution']);
+    expect(levelsOf(at(0.12, {}, shop))).toEqual(['note']);
+    expect(levelsOf(at(0.1999, {}, shop))).toEqual(['note']);
+    expect(at(0.2, {}, shop)).toEqual([]);
+    expect(at(0.1199, {}, shop)[0]!.source).toContain('AC 43.13-1B');
     // Where tables differ, all are shown.
-    expect(at(0.1199)[0]!.message).toContain('Aluminum Association: 4 T');
+    expect(at(0.1199, {}, shop)[0]!.message).toContain('Aluminum Association: 4 T');
   });
 
-  it("goes by the shop's choice of table", () => {
+  it('goes by the Aluminum Association where the shop says so', () => {
     const shop = { radiusRule: 'Aluminum Association' };
     expect(levelsOf(at(0.1599, {}, shop))).toEqual(['caution']);
     expect(at(0.16, {}, shop)).toEqual([]);
-    expect(levelsOf(at(0.1599, {}, { radiusRule: 'stricter' }))).toEqual(['caution']);
+  });
+
+  it('by default goes by the stricter of the two: 4 T from the one, up to 5 T from the other', () => {
+    expect(levelsOf(at(0.1599))).toEqual(['caution']);
+    expect(at(0.1599)[0]!.source).toContain('Aluminum Association');
+    expect(levelsOf(at(0.16))).toEqual(['note']);
+    expect(levelsOf(at(0.1999))).toEqual(['note']);
+    expect(at(0.2)).toEqual([]);
   });
 
   it('reads a thickness between two columns in the thicker one', () => {
-    expect(levelsOf(at(2 * 0.032, { thickness: 0.032 }))).toEqual(['note']);
-    expect(levelsOf(at(2 * 0.034, { thickness: 0.034 }))).toEqual(['caution']);
-    expect(levelsOf(at(3 * 0.034, { thickness: 0.034 }))).toEqual(['note']);
+    const shop = { radiusRule: 'AC 43.13-1B' };
+    expect(levelsOf(at(2 * 0.032, { thickness: 0.032 }, shop))).toEqual(['note']);
+    expect(levelsOf(at(2 * 0.034, { thickness: 0.034 }, shop))).toEqual(['caution']);
+    expect(levelsOf(at(3 * 0.034, { thickness: 0.034 }, shop))).toEqual(['note']);
   });
 
   it('asks 1.5 times as much along the grain', () => {
-    expect(levelsOf(at(0.1799, { grain: 'along' }))).toEqual(['caution']);
-    expect(levelsOf(at(0.18, { grain: 'along' }))).toEqual(['note']);
+    expect(levelsOf(at(0.2399, { grain: 'along' }))).toEqual(['caution']);
+    expect(levelsOf(at(0.24, { grain: 'along' }))).toEqual(['note']);
     expect(at(0.3, { grain: 'along' })).toEqual([]);
   });
 
@@ -110,6 +119,38 @@ describe('radius-below-minimum', () => {
     expect(at(0, { material: 'unobtainable' })).toEqual([]);
     expect(at(0, { material: undefined })).toEqual([]);
     expect(at(0.01, { thickness: 0.9 })).toEqual([]);
+  });
+});
+
+describe('allowance-beyond-sheet', () => {
+  // R 0.125, T 0.04, 90°: the inside face is 0.19635 long, the outside 0.25918.
+  const at = (allowance: number) =>
+    findingsOf('allowance-beyond-sheet', [
+      { leg: 2 },
+      { ...bendUp(90, 0.125), allowance: { method: 'measured', allowance } },
+      { leg: 2 },
+    ]);
+
+  it('is a caution below the inside face and above the outside face, and none between', () => {
+    expect(levelsOf(at(0.1963))).toEqual(['caution']);
+    expect(at(0.1964)).toEqual([]);
+    expect(at(0.2591)).toEqual([]);
+    expect(levelsOf(at(0.2592))).toEqual(['caution']);
+  });
+});
+
+describe('the least figure that a stop asks for', () => {
+  it('is rounded up, so that typing it back is enough', () => {
+    const run = (length: number) =>
+      findingsOf('joggle-run-too-short', [
+        { leg: 1 },
+        { joggle: 0.2, run: length, turn: 'up', radius: 0.125 },
+        { leg: 1 },
+      ]);
+    const asked = Number(/shortest run is ([\d.]+)/.exec(run(0.2)[0]!.message)?.[1]);
+    expect(asked).toBeGreaterThan(0.27);
+    expect(run(asked)).toEqual([]);
+    expect(run(asked - 0.00002).length).toBe(1);
   });
 });
 

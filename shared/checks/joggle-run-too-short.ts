@@ -1,4 +1,4 @@
-import { type Check, shown } from './check';
+import { type Check, leastShown, shown } from './check';
 
 /** A joggle whose two bends don't fit into its run. Source: geometry. */
 export const joggleRunTooShort: Check = ({ figures, layout }) =>
@@ -13,7 +13,7 @@ export const joggleRunTooShort: Check = ({ figures, layout }) =>
         at: `chain/${joggle.chain}`,
         message:
           `A joggle ${shown(joggle.offset)} ${unit} deep can't be made over a run of ${shown(joggle.run)} ${unit} with this radius. ` +
-          `The shortest run is ${shown(shortest)} ${unit}; a smaller radius shortens it.`,
+          `The shortest run is ${leastShown(shortest)} ${unit}; a smaller radius shortens it.`,
         source: 'geometry: two arcs and their common tangent',
       },
     ];

@@ -1,4 +1,4 @@
-import { type Check, legName, shown } from './check';
+import { type Check, leastShown, legName, shown } from './check';
 
 /** The bends at a leg's ends take more than the leg: flat ≤ 0. Source: geometry. */
 export const legConsumed: Check = ({ figures, layout }) =>
@@ -13,7 +13,7 @@ export const legConsumed: Check = ({ figures, layout }) =>
         at: `chain/${leg.chain}`,
         message:
           `${legName(leg.name, i)} is ${shown(leg.dimension)} ${unit}, but its bends take ${shown(shortest)} ${unit} of it: no flat is left. ` +
-          `Make it longer than ${shown(shortest)} ${unit}, or the radius smaller.`,
+          `Make it longer than ${leastShown(shortest)} ${unit}, or the radius smaller.`,
         source: 'geometry: flat = dimension − setbacks',
       },
     ];

@@ -31,11 +31,14 @@ export function rulingRadius({ figures, rules }: Pick<CheckInput, 'figures' | 'r
   };
 }
 
-/** The named table where it has a row, else the stricter of those that have one. */
+/** The named table where it has a row; else the stricter of all, whose range reaches as far up as any table's does. */
 function chosen(rows: readonly MinimumRadius[], rule: string): MinimumRadius | null {
   const named = rows.find((row) => row.table === rule);
   if (named !== undefined) return named;
-  return rows.reduce<MinimumRadius | null>((most, row) => (most === null || row.lower > most.lower ? row : most), null);
+  const [first, ...rest] = rows;
+  if (first === undefined) return null;
+  const strictest = rest.reduce((most, row) => (row.lower > most.lower ? row : most), first);
+  return { ...strictest, upper: Math.max(...rows.map((row) => row.upper)) };
 }
 
 function inWords({ table, lower, upper, column }: MinimumRadius): string {

@@ -1,5 +1,6 @@
 import type { Finding, FindingLevel } from '../result';
 import type { Check, CheckInput } from './check';
+import { allowanceBeyondSheet } from './allowance-beyond-sheet';
 import { grainAlongBend } from './grain-along-bend';
 import { joggleRunTooShort } from './joggle-run-too-short';
 import { kAboveHalf } from './k-above-half';
@@ -20,6 +21,7 @@ const CHECKS: readonly Check[] = [
   radiusBelowMinimum,
   grainAlongBend,
   kAboveHalf,
+  allowanceBeyondSheet,
   holeEdgeDistance,
   holeNearBend,
   joggleRunSteep,

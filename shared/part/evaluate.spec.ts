@@ -182,4 +182,14 @@ describe('A refused document', () => {
     expect(solved.developedLength).toBe(2.5);
     expect(solved.thickness).toBeCloseTo(1 / 25.4, 14);
   });
+
+  it('refuses a broken variable of a dash number at its own place', () => {
+    const dashNumbers = [
+      { dash: '-1', variables: { W: 3 } },
+      { dash: '-3', variables: { W: 'V' } },
+    ];
+    expect(pathsOf(partOf([{ leg: 'W' }], { variables: { W: 2 }, dashNumbers }))).toEqual(['dashNumbers/1/variables/W']);
+  });
+    expect(!evaluated.ok && evaluated.errors.map(({ path }) => path)).toEqual(['dashNumbers/1/variables/W']);
+  });
 });

@@ -49,6 +49,7 @@ export function evaluateDocument(document: PartDocument): Evaluation {
     end: reader.length(document.trim?.end ?? 0, 'trim/end', { least: 0, says: 'A trim allowance' }),
   };
   checkTolerances(reader, document.tolerances ?? {});
+  for (const error of dashErrors(document)) reader.fail(error.path, error.message);
   if (reader.errors.length > 0) return { ok: false, errors: reader.errors };
   const named = typeof document.material === 'string' ? findMaterial(document.material) : null;
   const material = typeof document.material === 'string' ? named : (document.material ?? null);
@@ -69,6 +70,15 @@ export function evaluateDocument(document: PartDocument): Evaluation {
       trim,
     },
   };
+}
+
+/** The variables of a dash number stand over the part's own; a broken one is an error like any other. */
+function dashErrors(document: PartDocument): readonly FieldError[] {
+  return (document.dashNumbers ?? []).flatMap(({ variables }, i) => {
+    if (variables === undefined) return [];
+    const { errors } = evaluateVariables({ ...document.variables, ...variables }, document.unit);
+    return errors.map(({ path, message }) => ({ path: `dashNumbers/${i}/${path}`, message }));
+  });
 }
 
 function chosenNoses(document: PartDocument): ReadonlySet<number> {

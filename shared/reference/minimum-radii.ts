@@ -63,8 +63,8 @@ export interface MinimumRadius {
   readonly source: string;
 }
 
-/** Inches: 0.063 sheet is read in the 1/16 column, which the table means by it. */
-const SAME_GAGE = 0.0006;
+/** Inches: sheet of 0.032 and 0.063 is read in the columns 1/32 and 1/16, which the tables mean by it. */
+const SAME_GAGE = 0.0008;
 
 /**
  * What the tables say of a material at a thickness. Between two columns the thicker one is read.

@@ -6,11 +6,11 @@ const pathsOf = (value: unknown): string[] => {
 };
 
 describe('The shop context', () => {
-  it('that says nothing leaves the limits of common practice and AC 43.13-1B in force', () => {
+  it('that says nothing leaves the limits of common practice in force, and the stricter of the tables', () => {
     for (const nothing of [undefined, {}]) {
       const restored = restoreShop(nothing);
       expect(restored.ok && restored.rules).toEqual({
-        radiusRule: 'AC 43.13-1B',
+        radiusRule: 'stricter',
         limits: { ...COMMON_PRACTICE, holeEdge: HOLE_EDGE },
       });
     }

@@ -49,7 +49,7 @@ export interface ShopRules {
 export type RestoredShop =
   { readonly ok: true; readonly rules: ShopRules } | { readonly ok: false; readonly errors: readonly FieldError[] };
 
-const OPEN: ShopRules = { radiusRule: 'AC 43.13-1B', limits: { ...COMMON_PRACTICE, holeEdge: HOLE_EDGE } };
+const OPEN: ShopRules = { radiusRule: 'stricter', limits: { ...COMMON_PRACTICE, holeEdge: HOLE_EDGE } };
 
 /**
  * The gate for a shop context of unknown origin.

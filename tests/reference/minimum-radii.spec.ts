@@ -25,6 +25,7 @@ describe('Published minimum radii for 90° cold bends, in thicknesses', () => {
 
   it('a thickness between two columns takes the thicker; a gage at a column takes that column', () => {
     expect(read('2024-T3', 0.033)).toContain('AC 43.13-1B: 3-5');
+    expect(read('2024-T3', 0.032)).toContain('Aluminum Association: 3-3');
     expect(read('5052-H34', 0.063)).toContain('Aluminum Association: 1.5-1.5');
     expect(read('5052-H34', 0.0635)).toContain('Aluminum Association: 2-2');
   });
