@@ -188,8 +188,8 @@ describe('A refused document', () => {
       { dash: '-1', variables: { W: 3 } },
       { dash: '-3', variables: { W: 'V' } },
     ];
-    expect(pathsOf(partOf([{ leg: 'W' }], { variables: { W: 2 }, dashNumbers }))).toEqual(['dashNumbers/1/variables/W']);
-  });
-    expect(!evaluated.ok && evaluated.errors.map(({ path }) => path)).toEqual(['dashNumbers/1/variables/W']);
+    expect(pathsOf(partOf([{ leg: 'W' }], { variables: { W: 2 }, dashNumbers }))).toEqual([
+      'dashNumbers/1/variables/W',
+    ]);
   });
 });
