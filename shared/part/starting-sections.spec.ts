@@ -39,6 +39,14 @@ describe('The starting sections', () => {
     }
   });
 
+  it('lie on the leg that makes the envelope as high as the size says', () => {
+    for (const id of ['channel', 'z', 'hat', 'lipped-channel']) {
+      const { seat, sizes } = STARTING_SECTIONS.find((section) => section.id === id)!;
+      const { solved } = made(id, Object.fromEntries(sizes.map(({ key, initial }) => [key, initial.in])), seat);
+      expect(solved.formed!.envelope!.height).withContext(id).toBeCloseTo(1, 9);
+    }
+  });
+
   it('come out with the overall sizes that were asked for', () => {
     expect(envelopeOf('angle', { first: '3', second: '2' }, 0)).toEqual([3, 2]);
     expect(envelopeOf('channel', { height: '1', width: '2' }, 1)).toEqual([2, 1]);

@@ -15,6 +15,8 @@ export interface StartingSection {
   /** One sentence on what is measured how. */
   readonly says: string;
   readonly sizes: readonly Size[];
+  /** The leg that lies level, so that width and height of the formed part are the ones that the sizes speak of. */
+  readonly seat: number;
   /** @param sizes figure or expression by key @param radius of every bend @returns the chain, measured to mold lines */
   readonly make: (sizes: Readonly<Record<string, string>>, radius: string) => ChainEntry[];
 }
@@ -50,6 +52,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'angle',
     name: 'Angle',
+    seat: 0,
     says: 'Both legs outside to outside.',
     sizes: [size('first', 'First leg', '1', '25'), size('second', 'Second leg', '1', '25')],
     make: square(
@@ -63,6 +66,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'channel',
     name: 'Channel',
+    seat: 1,
     says: 'Flange height and web width, outside to outside.',
     sizes: [HEIGHT, WIDTH],
     make: square(
@@ -77,6 +81,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'z',
     name: 'Z',
+    seat: 0,
     says: 'Web height from outside to outside, each flange from its edge to the outside of the web.',
     sizes: [size('lower', 'Lower flange', '3/4', '20'), HEIGHT, size('upper', 'Upper flange', '3/4', '20')],
     make: square(
@@ -91,6 +96,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'hat',
     name: 'Hat',
+    seat: 0,
     says: 'Height from under the feet to the top of the crown, crown outside to outside, feet from edge to the far face of the web.',
     sizes: [size('foot', 'Each foot', '3/4', '20'), HEIGHT, size('crown', 'Crown width', '1 1/2', '40')],
     make: square(
@@ -107,6 +113,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'lipped-channel',
     name: 'Lipped channel',
+    seat: 2,
     says: 'Lips, flange height and web width, outside to outside.',
     sizes: [size('lip', 'Each lip', '1/2', '12'), HEIGHT, WIDTH],
     make: square(
@@ -123,6 +130,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'j',
     name: 'J',
+    seat: 1,
     says: 'Tall leg, web and short return, outside to outside.',
     sizes: [
       size('leg', 'Tall leg', '1 1/2', '40'),
@@ -141,6 +149,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'sloped-hat',
     name: 'Hat with sloped webs',
+    seat: 0,
     says: 'Height from the top of the feet to the top of the crown; crown and feet to the sharp outside corners; webs at the angle that they are bent up from the feet.',
     sizes: [
       size('foot', 'Each foot', '3/4', '20'),
@@ -173,6 +182,7 @@ export const STARTING_SECTIONS: readonly StartingSection[] = [
   {
     id: 'stepped-angle',
     name: 'Angle with a stepped leg',
+    seat: 0,
     says: 'Both legs outside to outside, the second over its step; the land is the flat end past the step.',
     sizes: [
       size('first', 'First leg', '1', '25'),

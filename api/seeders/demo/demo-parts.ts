@@ -88,6 +88,7 @@ export const DEMO_PARTS: readonly DemoPart[] = [
       thickness: 1,
       material: '2024-T3',
       width: 320,
+      seat: 0,
       chain: [leg(20, 'Panel flange'), bend(90, 'up', 4), leg(38, 'Web'), bend(90, 'down', 4), leg(20, 'Free flange')],
     },
   },
@@ -120,6 +121,7 @@ export const DEMO_PARTS: readonly DemoPart[] = [
       thickness: 0.04,
       material: 'Alclad 2024-T3',
       width: 18,
+      seat: 0,
       chain: [
         leg(0.75, 'Wall flange'),
         bend(90, 'up', 0.16),

@@ -6,7 +6,6 @@ import type { Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { evaluate } from '@shared/units/expression';
 import type { NewPartValues } from './new-part-form';
-import { SECTION_SEATS } from './section-seats';
 
 /** Messages by field: `thickness`, `size/web`, `chain`, `document`; what belongs to no field stands under `section`. */
 export type Messages = Readonly<Record<string, string>>;
@@ -65,7 +64,7 @@ function allowanceOf({ method, k, hardness }: NewPartValues): Allowance {
 
 /** A typed chain says nothing of how the part lies; the engine chooses. */
 function seatOf({ way, section }: NewPartValues): { seat?: number } {
-  const seat = way === 'section' ? SECTION_SEATS.get(section) : undefined;
+  const seat = way === 'section' ? STARTING_SECTIONS.find(({ id }) => id === section)?.seat : undefined;
   return seat === undefined ? {} : { seat };
 }
 

@@ -7,7 +7,6 @@ import { seated } from '@shared/formed/seated';
 import { solve } from '@shared/solve';
 import { type Outline, SectionDrawing } from '../ui/section-drawing';
 import { SHEET_STARTS } from './new-part-form';
-import { SECTION_SEATS } from './section-seats';
 
 /** The starting sections, each drawn by the engine at the sizes it starts with. */
 @Component({
@@ -44,7 +43,7 @@ const PICTURED = STARTING_SECTIONS.map((section) => {
     thickness: PICTURE_THICKNESS,
     allowance: { method: 'handbook' },
     chain: section.make(sizes, SHEET_STARTS.radius.in),
-    seat: SECTION_SEATS.get(section.id),
+    seat: section.seat,
   });
   const faces = result.ok ? seated(result) : null;
   const outline: Outline | null = faces ? outlineOf(faces) : null;
