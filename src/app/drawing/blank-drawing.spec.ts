@@ -44,6 +44,16 @@ describe('the blank drawing', () => {
     expect(figures('both')).toBe(2 + 16);
   });
 
+  it('tells the two sight lines of a bend apart, by a letter and by the kind of line', () => {
+    const drawing = drawn(samplePart('tray', 2), 'sight lines')!;
+    const letters = texts(drawing).filter((text) => text.role === 'station');
+    expect(letters.filter(({ text }) => / D$/.test(text)).length).toBe(2);
+    expect(letters.filter(({ text }) => / F$/.test(text)).length).toBe(2);
+    const lines = drawing.marks.map(({ role }) => role);
+    expect(lines.filter((role) => role === 'sight-datum').length).toBe(2);
+    expect(lines.filter((role) => role === 'sight-far').length).toBe(2);
+  });
+
   it('gets wider than its room rather than crowded', () => {
     expect(drawn(samplePart('tray', 4), 'tangents')?.width).toBe(950);
     expect(drawn(samplePart('tray', 24), 'tangents', 358)!.width).toBeGreaterThan(1000);

@@ -26,6 +26,11 @@ export interface BlankDrawing extends Drawing {
   readonly widthToScale: boolean;
 }
 
+/** Which side of the blank is under the nose: what tells the two sight lines of a bend apart. */
+type Side = 'datum' | 'far';
+/** Behind a sight line's figure; the deck says below what they stand for. */
+export const SIDE_LETTERS: Readonly<Record<Side, string>> = { datum: 'D', far: 'F' };
+
 const MARGIN = 46;
 const LEAST_HEIGHT = 64;
 const MOST_HEIGHT = 132;
@@ -97,6 +102,14 @@ function topStations(bends: readonly Placed[], length: number, options: BlankOpt
   return [...ends, ...(lines === 'sight lines' ? sightStations(bends, options) : tangentStations(bends, options))];
 }
 
+const sightLines = ({ sightLine }: BendResult): readonly (readonly [number, Side])[] =>
+  sightLine === null
+    ? []
+    : [
+        [sightLine.startUnderNose, 'datum'],
+        [sightLine.endUnderNose, 'far'],
+      ];
+
 function tangentStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
   return bends.flatMap((bend) =>
     [bend.tangentStart, bend.tangentEnd].map((at): StationAt => {
@@ -108,9 +121,9 @@ function tangentStations(bends: readonly Placed[], { figureOf, selected }: Blank
 
 function sightStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
   return bends.flatMap((bend) =>
-    (bend.sightLine ? [bend.sightLine.startUnderNose, bend.sightLine.endUnderNose] : []).map((at): StationAt => {
+    sightLines(bend).map(([at, side]): StationAt => {
       const common = { pick: bend.chain, selected: bend.chain === selected };
-      return { at, text: figureOf(at), role: 'station', leader: true, ...common };
+      return { at, text: `${figureOf(at)} ${SIDE_LETTERS[side]}`, role: 'station', leader: true, ...common };
     }),
   );
 }
@@ -130,10 +143,13 @@ function lineMarks(
       { kind: 'path', role: 'centre', d: down(bend.centre), ...common },
       { kind: 'path', role: 'tangent', d: down(bend.tangentStart) + down(bend.tangentEnd), ...common },
     ];
-    if (lines !== 'tangents' && bend.sightLine) {
-      const { startUnderNose, endUnderNose } = bend.sightLine;
-      marks.push({ kind: 'path', role: 'sight', d: down(startUnderNose) + down(endUnderNose), ...common });
-    }
-    return marks;
+    if (lines === 'tangents') return marks;
+    const sights = sightLines(bend).map(([at, side]): Mark => ({
+      kind: 'path',
+      role: `sight-${side}`,
+      d: down(at),
+      ...common,
+    }));
+    return [...marks, ...sights];
   });
 }

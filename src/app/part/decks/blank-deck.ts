@@ -9,7 +9,7 @@ import {
 } from '@angular/core';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { formatAngle } from '@shared/units/format';
-import { BLANK_LINES, blankDrawing, type BlankLines } from '../../drawing/blank-drawing';
+import { BLANK_LINES, blankDrawing, type BlankLines, SIDE_LETTERS } from '../../drawing/blank-drawing';
 import { DrawingView } from '../../drawing/drawing-view';
 import { elementSize } from '../../drawing/element-size';
 import { PartEditor } from '../editing/part-editor';
@@ -30,6 +30,7 @@ export class BlankDeck {
 
   protected readonly unitWords = UNIT_WORDS;
   protected readonly choices = BLANK_LINES;
+  protected readonly letters = SIDE_LETTERS;
   protected readonly lines = signal<BlankLines>('tangents');
 
   protected readonly drawing = computed(() => {
