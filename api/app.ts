@@ -9,7 +9,7 @@ import { requestLog } from './middleware/request-log';
 import { securityHeaders } from './middleware/security-headers';
 import { sessions } from './middleware/session';
 import { SessionStore } from './middleware/session-store';
-import { SIGN_IN_LIMITS, type SignInLimits } from './middleware/sign-in-limits';
+import { SIGN_IN_LIMITS, signInGuard, type SignInLimits } from './middleware/sign-in-limits';
 import type { Database } from './models/database';
 import { appFiles } from './routes/app-files';
 import { healthRoutes } from './routes/health';
@@ -34,7 +34,7 @@ export interface AppDeps {
 
 export interface App {
   readonly express: Express;
-  /** Ends the clock that the session store keeps. */
+  /** Ends the clocks by which sessions and failed sign-ins are swept up. */
   readonly stop: () => void;
 }
 
@@ -61,10 +61,10 @@ export function createApp(deps: AppDeps): App {
   });
   app.use('/api', ...handlers);
 
-  const limits = deps.signInLimits ?? SIGN_IN_LIMITS;
+  const guard = signInGuard(deps.signInLimits ?? SIGN_IN_LIMITS);
   const operations = [
     ...healthRoutes(database),
-    ...sessionRoutes({ database, passport, csrf: tokens, limits, version, now }),
+    ...sessionRoutes({ database, passport, csrf: tokens, guard, version, now }),
     ...partRoutes(database, now),
     ...revisionRoutes(database, now),
     ...solveRoutes(),
@@ -75,5 +75,9 @@ export function createApp(deps: AppDeps): App {
   for (const handler of appFiles(deps.appFolder)) app.use(handler);
   app.use(notFound);
   app.use(errorHandler);
-  return { express: app, stop: () => store.stopExpiringSessions() };
+  const stop = (): void => {
+    store.stopExpiringSessions();
+    guard.stop();
+  };
+  return { express: app, stop };
 }

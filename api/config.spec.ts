@@ -23,6 +23,15 @@ describe('configuration', () => {
     expect(readConfig({ SESSION_SECRET: 'x'.repeat(32) }).sessionSecret).toBe('x'.repeat(32));
     expect(readConfig({ DATA_DIR: '/srv/shop' }).dataDir).toBe('/srv/shop');
     expect(readConfig({ SHOP_NAME: 'x'.repeat(80) }).shopName).toBe('x'.repeat(80));
+    for (const logLevel of ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']) {
+      expect(readConfig({ LOG_LEVEL: logLevel }).logLevel as string).toBe(logLevel);
+    }
+  });
+
+  it('can be for a shop of one’s own until told otherwise', () => {
+    expect(readConfig({}, 'own').shop).toBe('own');
+    expect(readConfig({ SHOP: '' }, 'own').shop).toBe('own');
+    expect(readConfig({ SHOP: 'demo' }, 'own').shop).toBe('demo');
   });
 
   for (const [env, words] of [
@@ -34,6 +43,7 @@ describe('configuration', () => {
     [{ LOG_LEVEL: 'loud' }, 'LOG_LEVEL must be one of'],
     [{ SESSION_SECRET: 'x'.repeat(31) }, 'SESSION_SECRET needs 32 characters'],
     [{ SHOP_NAME: 'x'.repeat(81) }, 'SHOP_NAME has 80 characters'],
+    [{ SHOP_NAME: 'Vale\u202eSheet' }, 'SHOP_NAME is one line of plain text.'],
     [{ TRUST_PROXY: 'yes' }, 'TRUST_PROXY must be'],
   ] as const) {
     it(`refuses ${JSON.stringify(env).slice(0, 40)} in plain words`, () => {

@@ -1,9 +1,10 @@
 /** The environment, typed. A wrong value stops the start with a sentence that names it. */
 import { resolve } from 'node:path';
 import { z } from 'zod';
+import { PLAIN_LINE } from '../shared/part/schema';
 import { PACKAGE_ROOT } from './package-root';
 
-export const LOG_LEVELS = ['silent', 'error', 'warn', 'info', 'debug'] as const;
+export const LOG_LEVELS = ['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'] as const;
 export type ShopKind = 'demo' | 'own';
 
 export interface Config {
@@ -42,36 +43,39 @@ const oneOf = <const T extends readonly string[]>(name: string, words: T, initia
       throw new StartRefused(`${name} must be one of: ${words.join(', ')}.`);
     });
 
-const environment = z.object({
-  // 0 lets the system choose a free port; the start message says which.
-  PORT: wholeNumber('PORT', 0, 65535, 4300),
-  // Nothing listens beyond this machine until somebody says so.
-  HOST: z.string().default('127.0.0.1'),
-  DATA_DIR: z.string().default('data'),
-  SHOP: oneOf('SHOP', ['demo', 'own'], 'demo'),
-  SHOP_NAME: z
-    .string()
-    .trim()
-    .max(80)
-    .optional()
-    .catch(() => {
-      throw new StartRefused('SHOP_NAME has 80 characters at most.');
-    }),
-  SESSION_SECRET: z
-    .string()
-    .min(32)
-    .optional()
-    .catch(() => {
-      throw new StartRefused('SESSION_SECRET needs 32 characters or more; leave it out to have one made.');
-    }),
-  LOG_LEVEL: oneOf('LOG_LEVEL', LOG_LEVELS, 'warn'),
-  TRUST_PROXY: wholeNumber('TRUST_PROXY', 0, 10, 0),
-});
+const environment = (shop: ShopKind) =>
+  z.object({
+    // 0 lets the system choose a free port; the start message says which.
+    PORT: wholeNumber('PORT', 0, 65535, 4300),
+    // Nothing listens beyond this machine until somebody says so.
+    HOST: z.string().default('127.0.0.1'),
+    DATA_DIR: z.string().default('data'),
+    SHOP: oneOf('SHOP', ['demo', 'own'], shop),
+    SHOP_NAME: z
+      .string()
+      .trim()
+      .max(80, 'SHOP_NAME has 80 characters at most.')
+      .regex(PLAIN_LINE, 'SHOP_NAME is one line of plain text.')
+      .optional()
+      .catch(({ error }) => {
+        throw new StartRefused(error.issues[0]?.message);
+      }),
+    SESSION_SECRET: z
+      .string()
+      .min(32)
+      .optional()
+      .catch(() => {
+        throw new StartRefused('SESSION_SECRET needs 32 characters or more; leave it out to have one made.');
+      }),
+    LOG_LEVEL: oneOf('LOG_LEVEL', LOG_LEVELS, 'warn'),
+    TRUST_PROXY: wholeNumber('TRUST_PROXY', 0, 10, 0),
+  });
 
-export function readConfig(env: Record<string, string | undefined>): Config {
+/** @param shop the kind of shop where the environment names none */
+export function readConfig(env: Record<string, string | undefined>, shop: ShopKind = 'demo'): Config {
   // An empty variable is how shells and unit files say "not set".
   const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== undefined && value !== ''));
-  const values = environment.parse(given);
+  const values = environment(shop).parse(given);
   return {
     port: values.PORT,
     host: values.HOST,

@@ -1,6 +1,6 @@
 /** What the terminal says when the shop is open. */
 import type { Config } from './config';
-import { DEMO_PASSWORD, DEMO_PEOPLE } from './seeders/demo/demo-people';
+import { DEMO_PASSWORD, DEMO_PEOPLE } from './demo-shop';
 
 const LOOPBACK = ['127.0.0.1', '::1', 'localhost', '0.0.0.0', '::'];
 

@@ -3,10 +3,18 @@ import { randomBytes } from 'node:crypto';
 import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { type Config, StartRefused } from './config';
+import { startRefusal } from './start-refusal';
 
 export function sessionSecret(config: Pick<Config, 'sessionSecret' | 'dataDir'>): string {
   if (config.sessionSecret) return config.sessionSecret;
-  const file = join(config.dataDir, 'session-secret');
+  try {
+    return keptSecret(join(config.dataDir, 'session-secret'));
+  } catch (error) {
+    throw startRefusal(error, config.dataDir);
+  }
+}
+
+function keptSecret(file: string): string {
   if (!existsSync(file)) {
     // 'wx': of two processes that start together one makes the key, the other reads it below.
     try {

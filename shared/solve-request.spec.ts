@@ -19,7 +19,7 @@ describe('A request to solve', () => {
   it('hands the shop on', () => {
     const steep = partOf([{ leg: 1 }, { joggle: 0.1, run: 0.3, turn: 'up', radius: 0.05 }, { leg: 1 }]);
     const result = solveRequest({ document: steep, shop: { limits: { joggleRun: 5 } } });
-    expect(result.ok && result.findings.map((finding) => finding.code)).toEqual(['joggle-run-steep']);
+    expect(result.ok && result.findings.map((finding) => finding.code)).toContain('joggle-run-steep');
   });
 
   it('is refused with the path of what is wrong', () => {

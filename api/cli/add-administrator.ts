@@ -1,8 +1,11 @@
 /** The command behind `npm run administrator`. */
 import { parseArgs } from 'node:util';
 import { readConfig } from '../config';
+import type { Database } from '../models/database';
 import { openShopDatabase } from '../open-shop-database';
-import { addAdministrator } from '../services/first-administrator';
+import { addAdministrator, NO_DEMO, personalFault } from '../services/first-administrator';
+import { passwordFault } from '../services/password';
+import { OtherShop } from '../services/shop';
 import { askPassword } from './ask-password';
 
 const USAGE = `npm run administrator -- --email ADDRESS --name "NAME" [--another]
@@ -11,7 +14,25 @@ Adds an administrator to a shop of your own (SHOP=own, DATA_DIR as for the serve
 The password is asked for, or read from standard input when that is piped.
 `;
 
+function refuse(fault: string | null): void {
+  if (fault !== null) throw new Error(fault);
+}
+
+/** The command is for shops of one's own: it founds one where there is none, once everything else is known to be in order. */
+async function openOwnShop(): Promise<Database> {
+  const config = readConfig(process.env, 'own');
+  const demo = `${NO_DEMO} Give the DATA_DIR of a shop of your own`;
+  if (config.shop === 'demo') throw new Error(`${demo}, and leave SHOP out.`);
+  try {
+    return await openShopDatabase(config);
+  } catch (error) {
+    throw error instanceof OtherShop ? new Error(`${demo}; ${config.dataDir} holds a demo shop.`) : error;
+  }
+}
+
 async function main(): Promise<void> {
+  // Until it is done: a process that runs out of things to do has added nobody.
+  process.exitCode = 1;
   const { values } = parseArgs({
     options: {
       email: { type: 'string' },
@@ -20,18 +41,21 @@ async function main(): Promise<void> {
       help: { type: 'boolean', default: false },
     },
   });
-  if (values.help || values.email === undefined || values.name === undefined) {
+  const { email, name, another } = values;
+  if (values.help || email === undefined || name === undefined) {
     (values.help ? process.stdout : process.stderr).write(USAGE);
-    process.exitCode = values.help ? 0 : 1;
+    if (values.help) process.exitCode = 0;
     return;
   }
-  // The command is for shops of one's own, so it founds one where there is none; a demo shop is refused with the reason.
-  const database = await openShopDatabase({ ...readConfig({ ...process.env, SHOP: process.env['SHOP'] ?? 'own' }) });
+  refuse(personalFault({ email, name }));
+  const password = await askPassword();
+  refuse(passwordFault(password));
+  const database = await openOwnShop();
   try {
-    const { email, name, another } = values;
-    const added = await addAdministrator(database, { email, name, another, password: await askPassword() }, new Date());
+    const added = await addAdministrator(database, { email, name, another, password }, new Date());
     if (!added.ok) throw new Error(added.message);
     process.stdout.write(`${added.person.name} (${added.person.email}) is an administrator now.\n`);
+    process.exitCode = 0;
   } finally {
     await database.close();
   }

@@ -1,24 +1,24 @@
 /** The one place where anything that went wrong becomes an answer. */
 import type { ErrorRequestHandler, RequestHandler } from 'express';
-import { BaseError } from 'sequelize';
 import type { Problem } from '../../shared/contracts/problem';
+import { Overdue } from '../models/one-at-a-time';
+import { sqliteCode } from '../models/sqlite-code';
 import { MAX_BODY } from './json-body';
 import { problem, ProblemError } from './problem';
 
 /** What SQLite says when the disk or another process, not the request, is in the way. */
 const UNAVAILABLE = /^SQLITE_(BUSY|LOCKED|FULL|READONLY|IOERR|CANTOPEN|CORRUPT|NOTADB|PROTOCOL)/;
 
-function databaseCode(error: unknown): string {
-  const original = error instanceof BaseError && 'original' in error ? error.original : error;
-  const code = (original as { code?: unknown } | null | undefined)?.code;
-  return typeof code === 'string' ? code : '';
-}
+const sizeWords = (bytes: number): string =>
+  bytes >= 1024 * 1024 ? `${bytes / 1024 / 1024} MB` : `${bytes / 1024} kB`;
 
 /** Errors of the framework itself (a body that can't be read, a path that can't be decoded) carry a status and mean the request. */
-function fromStatus(error: { status?: unknown; type?: unknown }): Problem | null {
+function fromStatus(error: { status?: unknown; type?: unknown; limit?: unknown }): Problem | null {
   switch (error.status) {
     case 413:
-      return problem('tooLarge', { detail: `A request may have ${MAX_BODY / 1024 / 1024} MB at most.` });
+      return problem('tooLarge', {
+        detail: `A request may have ${sizeWords(typeof error.limit === 'number' ? error.limit : MAX_BODY)} at most.`,
+      });
     case 415:
       return problem('unsupported', { detail: 'Send JSON in UTF-8, plain or compressed with gzip, deflate or br.' });
     case 404:
@@ -34,7 +34,7 @@ function fromStatus(error: { status?: unknown; type?: unknown }): Problem | null
 
 export function problemOf(error: unknown): Problem {
   if (error instanceof ProblemError) return error.problem;
-  if (UNAVAILABLE.test(databaseCode(error))) return problem('unavailable');
+  if (error instanceof Overdue || UNAVAILABLE.test(sqliteCode(error))) return problem('unavailable');
   return fromStatus(Object(error) as { status?: unknown }) ?? problem('internal');
 }
 
@@ -46,7 +46,9 @@ export const errorHandler: ErrorRequestHandler = (error, request, response, next
     next(error);
     return;
   }
-  if (answer.status === 503) response.setHeader('Retry-After', '5');
+  const retryAfter = error instanceof ProblemError ? error.retryAfter : null;
+  if (retryAfter !== null) response.setHeader('Retry-After', String(retryAfter));
+  else if (answer.status === 503) response.setHeader('Retry-After', '5');
   response.status(answer.status).type('application/problem+json').send(JSON.stringify(answer));
 };
 

@@ -17,6 +17,8 @@ const KINDS: Record<ProblemKind, { status: number; title: string }> = {
   taken: { status: 409, title: 'That is already in use.' },
   stale: { status: 409, title: 'Somebody saved a newer version.' },
   tooLarge: { status: 413, title: 'The request is too large.' },
+  headersTooLarge: { status: 431, title: 'The headers of the request are too large.' },
+  tooSlow: { status: 408, title: 'The request took too long to arrive.' },
   unsupported: { status: 415, title: 'The request is in a form that is not understood.' },
   unavailable: { status: 503, title: 'The shop’s data can’t be reached just now. Try again.' },
   internal: { status: 500, title: 'Something went wrong on the server.' },
@@ -28,6 +30,9 @@ export interface ProblemMore {
   readonly current?: unknown;
 }
 
+/** More of them help nobody, and an answer must not grow with what was sent. */
+const MOST_ERRORS = 50;
+
 export function problem(kind: ProblemKind, more: ProblemMore = {}): Problem {
   const { status, title } = KINDS[kind];
   return {
@@ -35,7 +40,7 @@ export function problem(kind: ProblemKind, more: ProblemMore = {}): Problem {
     title,
     status,
     ...(more.detail === undefined ? {} : { detail: more.detail }),
-    ...(more.errors === undefined ? {} : { errors: [...more.errors] }),
+    ...(more.errors === undefined ? {} : { errors: more.errors.slice(0, MOST_ERRORS) }),
     ...(more.current === undefined ? {} : { current: more.current }),
   };
 }
@@ -43,9 +48,12 @@ export function problem(kind: ProblemKind, more: ProblemMore = {}): Problem {
 /** Carries a problem from a middleware or a route to the error handler. */
 export class ProblemError extends Error {
   readonly problem: Problem;
+  /** Seconds after which it is worth another try. */
+  readonly retryAfter: number | null;
 
-  constructor(kind: ProblemKind, more: ProblemMore = {}) {
+  constructor(kind: ProblemKind, more: ProblemMore = {}, retryAfter: number | null = null) {
     super(KINDS[kind].title);
     this.problem = problem(kind, more);
+    this.retryAfter = retryAfter;
   }
 }

@@ -1,4 +1,10 @@
-import { DataTypes, type InferAttributes, type InferCreationAttributes, type Model } from 'sequelize';
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  type Model,
+} from 'sequelize';
 import type { ModelStatic, Sequelize } from 'sequelize';
 import type { Unit } from '../../shared/part/document';
 
@@ -19,6 +25,8 @@ export interface PartRecord extends Model<InferAttributes<PartRecord>, InferCrea
   createdBy: string;
   changedAt: string;
   changedBy: string;
+  /** Rises when number or title change. */
+  version: CreationOptional<number>;
   revision: string;
   state: 'draft';
   unit: Unit;
@@ -44,6 +52,7 @@ export const defineParts = (sequelize: Sequelize): ModelStatic<PartRecord> =>
       createdBy: { type: DataTypes.STRING, allowNull: false },
       changedAt: { type: DataTypes.STRING, allowNull: false },
       changedBy: { type: DataTypes.STRING, allowNull: false },
+      version: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
       revision: { type: DataTypes.STRING, allowNull: false },
       state: { type: DataTypes.STRING, allowNull: false },
       unit: { type: DataTypes.STRING, allowNull: false },

@@ -5,7 +5,7 @@ import { documentSchema } from '../../shared/part/schema';
 import { CSRF_HEADER } from '../middleware/csrf';
 import { problem, type ProblemKind } from '../middleware/problem';
 import { SESSION_COOKIE } from '../middleware/session';
-import { changes, type Operation } from '../routes/operation';
+import { changes, type Operation } from '../operation';
 
 type Json = Record<string, unknown>;
 

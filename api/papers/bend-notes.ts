@@ -1,13 +1,13 @@
-import type { BendResult, Solved } from '../../shared/result';
-import { formatAngle } from '../../shared/units/format';
+import { lineNote } from '../../shared/part/words';
+import type { LineNote } from '../../shared/part/words';
+import type { Solved } from '../../shared/result';
 import type { BlankView } from './blank-view';
 import { text, widthOf } from './lettering';
 import { TYPE } from './paper-size';
-import { betweenLegs, faceUp, lineName } from './part-words';
 import { THIN } from './pens';
 import { line } from './sheet';
 import type { Mark } from './sheet';
-import { farthestMove, spread } from './spread';
+import { farthestMove, spread } from '../../shared/geometry/spread';
 
 export type NoteStyle = 'level' | 'upward' | 'name' | 'none';
 
@@ -47,15 +47,15 @@ export function bendNoteWays(
   const ways: BendNotes[] = [];
   const none: BendNotes = { style: 'none', notes: [], put: [], height: 0 };
   if (bends.length === 0) return [none];
-  const notesOf = (lines: (bend: BendResult, name: string) => string[]): Note[] =>
-    bends.map(({ bend, index, station }) => ({ station, lines: lines(bend, lineName(index)) }));
+  const notesOf = (lines: (note: LineNote) => string[]): Note[] =>
+    bends.map(({ bend, index, station }) => ({ station, lines: lines(lineNote(bend, index)) }));
 
   // Within the blank the extension lines of the overall dimensions pass them by; wider only when it must be.
   const place = (pitch: number | readonly number[], ends: number): number[] | null =>
     spread(places, pitch, view.left + ends + 1, view.right - ends - 1) ??
     spread(places, pitch, view.low + ends, view.high - ends);
 
-  const stacked = notesOf((bend, name) => [name, faceUp(bend), `${formatAngle(bend.angle)} (${betweenLegs(bend)})`]);
+  const stacked = notesOf(({ line, face, angle, between }) => [line, face, `${angle} (${between})`]);
   const widths = stacked.map(noteWidth);
   const pitches = widths.slice(1).map((width, index) => (width + (widths[index] ?? 0)) / 2 + 3);
   const level = place(pitches, Math.max(0, ...widths) / 2);
@@ -69,15 +69,15 @@ export function bendNoteWays(
   };
   upward(
     'upward',
-    notesOf((bend, name) => [`${name} · ${faceUp(bend)}`, formatAngle(bend.angle), betweenLegs(bend)]),
+    notesOf(({ line, face, angle, between }) => [`${line} · ${face}`, angle, between]),
   );
   upward(
     'upward',
-    notesOf((bend, name) => [`${name} · ${faceUp(bend)}`, `${formatAngle(bend.angle)} (${betweenLegs(bend)})`]),
+    notesOf(({ line, face, angle, between }) => [`${line} · ${face}`, `${angle} (${between})`]),
   );
   upward(
     'name',
-    notesOf((_, name) => [name]),
+    notesOf(({ line }) => [line]),
   );
   return [...ways, none];
 }

@@ -1,4 +1,5 @@
 import type { Grain } from '../../shared/part/document';
+import { GRAIN_WORDS } from '../../shared/part/words';
 import { arrowhead } from './dimension';
 import { text, widthOf } from './lettering';
 import { TYPE } from './paper-size';
@@ -12,11 +13,6 @@ const KINDS: readonly (readonly [Pen, string])[] = [
   [SIGHT_DATUM_SIDE, 'sight line, datum side under the nose'],
   [SIGHT_FAR_SIDE, 'sight line, far side under the nose'],
 ];
-
-const GRAIN_WORDS: Readonly<Record<Grain, string>> = {
-  along: 'grain along the bend lines',
-  across: 'grain across, square to the bend lines',
-};
 
 /** What is drawn and at what scale, which way the grain runs, and what each kind of line means. */
 export function blankHeading(area: Box, scale: string, grain: Grain | undefined, bends: boolean): Mark[] {

@@ -5,7 +5,7 @@ import { TYPE } from './paper-size';
 import { BEND_LINE, FRAME, SIGHT_DATUM_SIDE, SIGHT_FAR_SIDE, TANGENT_LINE, THIN } from './pens';
 import { line } from './sheet';
 import type { Box, Mark, Pen } from './sheet';
-import { spread } from './spread';
+import { spread } from '../../shared/geometry/spread';
 
 interface DrawnLine {
   readonly station: number;

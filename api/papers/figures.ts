@@ -1,5 +1,5 @@
 import type { Unit } from '../../shared/part/document';
-import { PLACES, formatLength, nearest64 } from '../../shared/units/format';
+import { PLACES, formatLength, missText, nearest64 } from '../../shared/units/format';
 import { convertLength } from '../../shared/units/length';
 
 /** What stands where a figure would rest on a broken one: never a dash that could be read as nothing to do. */
@@ -28,9 +28,7 @@ export function otherFigure(value: number, unit: Unit): string {
 /** "5 53/64 −0.007": the mark on a rule, and how far that mark is from the figure. */
 export function sixtyfourthFigure(inches: number): string {
   const { text, error } = nearest64(inches);
-  const miss = formatLength(Math.abs(error), 'in');
-  const sign = Number(miss) === 0 ? '±' : error > 0 ? '+' : '−';
-  return `${text} ${sign}${miss}`;
+  return `${text} ${missText(error)}`;
 }
 
 /** A station in every way a shop reads it, one a line. */

@@ -1,16 +1,16 @@
+import { FINDING_LEVELS, placeWords } from '../../shared/part/finding-words';
 import type { Finding, FindingLevel, Solved } from '../../shared/result';
 import { widthOf, wrap } from './lettering';
 import { TYPE } from './paper-size';
-import { placeWords } from './part-words';
 import type { SheetFlow } from './sheet-flow';
 import { cellRoom, columnWidths, drawTable } from './table';
 import type { Column } from './table';
 
-const ORDER: readonly FindingLevel[] = ['stop', 'caution', 'note'];
+const whereOf = ({ at }: Finding, result: Solved): string => placeWords(result, at) || 'the part';
 
 /** Stops first, then cautions, then notes; within a level in the engine's order. */
 export const inOrder = (findings: readonly Finding[]): Finding[] =>
-  ORDER.flatMap((level) => findings.filter((finding) => finding.level === level));
+  FINDING_LEVELS.flatMap((level) => findings.filter((finding) => finding.level === level));
 
 const COLUMNS: readonly Column[] = [
   { head: ['level'], width: 20 },
@@ -26,7 +26,7 @@ export function drawFindings(flow: SheetFlow, result: Solved): number | null {
   const cell = (words: string, column: number): string[] => wrap(words, rooms[column] ?? 0, TYPE.body, 12);
   const rows = inOrder(result.findings).map((finding) => [
     { lines: [finding.level], weight: 'semibold' as const },
-    { lines: cell(placeWords(finding.at, result), 1), even: true },
+    { lines: cell(whereOf(finding, result), 1), even: true },
     { lines: cell(finding.message, 2), even: true },
     { lines: cell(finding.source, 3), even: true },
   ]);
@@ -43,13 +43,13 @@ export interface Summary {
 
 /** The stops and cautions for the first sheet, as many as there is room for, and where the rest stands. */
 export function summarise(result: Solved, room: number, most: number, sheet: number | null): Summary {
-  const counted = ORDER.map((level) => ({ level, many: count(result.findings, level) }));
+  const counted = FINDING_LEVELS.map((level) => ({ level, many: count(result.findings, level) }));
   const head = counted.map(({ level, many }) => `${many} ${level}${many === 1 ? '' : 's'}`).join(' · ');
   if (result.findings.length === 0) return { head, lines: ['The checks that were run found nothing.'] };
   const pending = inOrder(result.findings).filter(({ level }) => level !== 'note');
   const lines: string[] = [];
   for (const [index, finding] of pending.entries()) {
-    const wrapped = wrap(`${finding.level} · ${placeWords(finding.at, result)}: ${finding.message}`, room, TYPE.small);
+    const wrapped = wrap(`${finding.level} · ${whereOf(finding, result)}: ${finding.message}`, room, TYPE.small);
     const last = index === pending.length - 1;
     if (lines.length + wrapped.length > most - (last && sheet === null ? 0 : 1)) break;
     lines.push(...wrapped);

@@ -1,3 +1,4 @@
+import { lineName } from '../../shared/part/words';
 import type { Solved } from '../../shared/result';
 import { CAUTIONS } from './cautions';
 import { drawEnlargedLines, firstLine } from './enlarged-lines';
@@ -5,7 +6,6 @@ import { summarise } from './findings-list';
 import { drawFormed } from './formed-picture';
 import { text, wrap } from './lettering';
 import { TYPE } from './paper-size';
-import { lineName } from './part-words';
 import { RULE } from './pens';
 import { line } from './sheet';
 import type { Box, Mark } from './sheet';

@@ -1,3 +1,5 @@
+import { seated } from '../../shared/formed/seated';
+import { arcPoint } from '../../shared/geometry/curve';
 import type { FaceElement, Solved, XY } from '../../shared/result';
 import { lengthFigure } from './figures';
 import { text } from './lettering';
@@ -8,33 +10,19 @@ import type { Box, Mark, Point } from './sheet';
 /** An arc as chords this short can't be told from it on paper. */
 const STEP = 4;
 
-function points(element: FaceElement): XY[] {
-  if ('line' in element) return [...element.line];
-  const { centre, radius, from, sweep } = element.arc;
+function points(element: FaceElement): readonly XY[] {
+  if ('line' in element) return element.line;
+  const { from, sweep } = element.arc;
   const steps = Math.max(1, Math.ceil(Math.abs(sweep) / STEP));
-  return Array.from({ length: steps + 1 }, (_, index): XY => {
-    const angle = ((from + (sweep * index) / steps) * Math.PI) / 180;
-    return [centre[0] + radius * Math.cos(angle), centre[1] + radius * Math.sin(angle)];
-  });
-}
-
-/** Which way the seat leg points in the frame of leg 0, degrees. */
-function seatDirection({ bends, legs }: Solved, seat: number): number {
-  const chain = legs[seat]?.chain ?? 0;
-  return bends
-    .filter((bend) => bend.chain < chain)
-    .reduce((sum, bend) => sum + (bend.turn === 'up' ? bend.angle : -bend.angle), 0);
+  return Array.from({ length: steps + 1 }, (_, index) => arcPoint(element.arc, from + (sweep * index) / steps));
 }
 
 /** The outline of the formed section, y up, with its seat leg level; null when there is no section. */
 export function formedOutline(result: Solved): XY[] | null {
-  const faces = result.formed?.faces;
+  const faces = seated(result);
   if (!faces) return null;
   const ring = [...faces.upper.flatMap(points), ...faces.lower.flatMap(points).reverse()];
-  if (ring.length < 3) return null;
-  const turn = (-seatDirection(result, result.formed?.envelope?.seat ?? 0) * Math.PI) / 180;
-  const [cos, sin] = [Math.cos(turn), Math.sin(turn)];
-  return ring.map(([x, y]): XY => [x * cos - y * sin, x * sin + y * cos]);
+  return ring.length < 3 ? null : ring;
 }
 
 /** A small picture of the formed section, not to a standard scale, with its envelope under it. */

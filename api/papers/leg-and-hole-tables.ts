@@ -1,10 +1,10 @@
 import type { PartDocument } from '../../shared/part/document';
+import { legName, measureWords } from '../../shared/part/words';
 import type { Solved } from '../../shared/result';
 import { lengthFigure } from './figures';
 import { shorten, wrap } from './lettering';
 import { stationCell } from './line-schedule';
 import { TYPE } from './paper-size';
-import { legName, measureWords } from './part-words';
 import type { SheetFlow } from './sheet-flow';
 import { cellRoom, columnWidths, drawTable } from './table';
 import type { Column } from './table';

@@ -1,9 +1,9 @@
+import { legName } from '../../shared/part/words';
 import type { Solved } from '../../shared/result';
 import type { BlankView } from './blank-view';
 import { lengthFigure } from './figures';
 import { shorten, text, widthOf } from './lettering';
 import { TYPE } from './paper-size';
-import { legName } from './part-words';
 import { QUIET } from './pens';
 import type { Box, TextMark } from './sheet';
 

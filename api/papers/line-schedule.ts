@@ -1,10 +1,12 @@
 import type { Unit } from '../../shared/part/document';
+import { METHOD_WORDS } from '../../shared/part/allowance-words';
+import { UNIT_WORDS, between, faceUp, lineName } from '../../shared/part/words';
 import type { BendResult, Solved } from '../../shared/result';
 import { formatAngle, formatLength } from '../../shared/units/format';
-import { exactFigure, lengthFigure, stationFigures } from './figures';
+import { exactFigure, lengthFigure, otherUnit, stationFigures } from './figures';
 import { wrap } from './lettering';
 import { TYPE } from './paper-size';
-import { METHOD_NAMES, bendName, faceUp, lineName } from './part-words';
+import { bendName } from './part-words';
 import type { SheetFlow } from './sheet-flow';
 import { cellRoom, columnWidths, drawTable } from './table';
 import type { Cell, Column } from './table';
@@ -32,10 +34,9 @@ export function drawLineSchedule(flow: SheetFlow, result: Solved): void {
   const room = cellRoom(columnWidths(COLUMNS, flow.area.width)[1] ?? 0);
   const rows = result.bends.map((bend, index) => rowOf(bend, index, result, room));
   const { unit } = result;
-  const ways =
-    unit === 'in'
-      ? 'inches; under each the nearest 1/64 with its miss (mark − station), and millimetres'
-      : 'millimetres; under each inches';
+  const other = UNIT_WORDS[otherUnit(unit)];
+  const beside = unit === 'in' ? `the nearest 1/64 with its miss (mark − station), and ${other}` : other;
+  const ways = `${UNIT_WORDS[unit]}; under each ${beside}`;
   drawTable(flow, `Line schedule: stations from the net datum edge, ${ways}`, COLUMNS, rows);
 }
 
@@ -47,9 +48,9 @@ function rowOf(bend: BendResult, index: number, result: Solved, room: number): C
     { lines: [lineName(index)], weight: 'semibold' },
     { lines: wrap(name, room, TYPE.body, 3), even: true },
     { lines: [bend.turn, faceUp(bend)] },
-    { lines: [formatAngle(bend.angle), `${formatAngle(180 - bend.angle)} between`, 'legs'] },
+    { lines: [formatAngle(bend.angle), between(bend.angle), 'legs'] },
     { lines: [exactFigure(bend.radius, unit), `nose ${exactFigure(bend.noseRadius, unit)}`] },
-    { lines: [lengthFigure(bend.allowance, unit), `K ${formatLength(bend.kFactor, 'in')}`, METHOD_NAMES[bend.method]] },
+    { lines: [lengthFigure(bend.allowance, unit), `K ${formatLength(bend.kFactor, 'in')}`, METHOD_WORDS[bend.method]] },
     { lines: [bend.setback === null ? 'none' : lengthFigure(bend.setback, unit)] },
     stationCell(bend.tangentStart, unit),
     { ...stationCell(bend.centre, unit), weight: 'semibold' },

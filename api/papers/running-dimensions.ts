@@ -8,7 +8,7 @@ import { TYPE } from './paper-size';
 import { THIN } from './pens';
 import { line } from './sheet';
 import type { Mark, Weight } from './sheet';
-import { farthestMove, spread } from './spread';
+import { farthestMove, spread } from '../../shared/geometry/spread';
 
 interface Label {
   readonly station: number;

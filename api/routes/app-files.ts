@@ -2,6 +2,7 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import express, { type Request, type RequestHandler, type Response } from 'express';
+import { ProblemError } from '../middleware/problem';
 import { styleNonce } from '../middleware/security-headers';
 
 /** The build puts a hash of the content in these names, so they never change. */
@@ -11,10 +12,12 @@ const YEAR = 365 * 24 * 60 * 60;
 /** The app reads the nonce for its styles from its root element. */
 const ROOT_ELEMENT = /(<body[^>]*>\s*(?:<noscript>.*?<\/noscript>\s*)?<[a-z]+(?:-[a-z]+)+)(?=[\s>])/s;
 
+const isRead = (request: Request): boolean => request.method === 'GET' || request.method === 'HEAD';
+
 const isNavigation = (request: Request): boolean => {
   const lastStep = request.path.slice(request.path.lastIndexOf('/') + 1);
   return (
-    (request.method === 'GET' || request.method === 'HEAD') &&
+    isRead(request) &&
     !request.path.startsWith('/api/') &&
     // A missing chunk or picture is missing; a page in its place would be read as one.
     !/\.[a-z0-9]{1,8}$/i.test(lastStep) &&
@@ -34,8 +37,12 @@ export function appFiles(folder: string): RequestHandler[] {
 
   return [
     (request, response, next) => {
-      if (request.path === '/index.html') sendPage(response);
-      else next();
+      if (request.path !== '/index.html') next();
+      else if (isRead(request)) sendPage(response);
+      else {
+        response.setHeader('Allow', 'GET, HEAD');
+        throw new ProblemError('methodNotAllowed');
+      }
     },
     express.static(folder, {
       index: false,

@@ -1,7 +1,7 @@
 /** For whoever watches the server: it answers, and its database does. */
 import { z } from 'zod';
 import type { Database } from '../models/database';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 
 export const healthRoutes = (database: Database): Operation[] => [
   operation({

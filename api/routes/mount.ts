@@ -4,7 +4,7 @@ import { requireAccess } from '../middleware/access';
 import { checked } from '../middleware/checked';
 import { jsonBody } from '../middleware/json-body';
 import { ProblemError } from '../middleware/problem';
-import { changes, type Operation } from './operation';
+import { changes, type Operation } from '../operation';
 
 const checkBody =
   (operation: Operation): RequestHandler =>
@@ -28,8 +28,7 @@ export function mount(operations: readonly Operation[], csrfCheck: RequestHandle
       operation.path,
       requireAccess(operation.access),
       ...(changes(operation.method) ? [csrfCheck] : []),
-      ...(operation.body ? [jsonBody, checkBody(operation)] : []),
-      ...(operation.before ?? []),
+      ...(operation.body ? [jsonBody(operation.bodyLimit), checkBody(operation)] : []),
       perform(operation),
     );
   }

@@ -1,7 +1,7 @@
 /** The API's own description, made from the records that mount it. */
 import { z } from 'zod';
 import { describeApi } from '../openapi/describe-api';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 
 export const openapiRoutes = (others: readonly Operation[], version: string): Operation[] => {
   const self = operation({

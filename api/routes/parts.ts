@@ -11,7 +11,7 @@ import { ProblemError } from '../middleware/problem';
 import type { Database } from '../models/database';
 import { changePart, createPart, readPart } from '../services/parts';
 import { listParts } from '../services/register';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 import { valueOf } from './outcome-answer';
 
 export const partRoutes = (database: Database, now: () => Date): Operation[] => [
@@ -56,10 +56,10 @@ export const partRoutes = (database: Database, now: () => Date): Operation[] => 
     method: 'patch',
     path: '/api/parts/:id',
     access: ['designer'],
-    summary: 'Another number or title for a part.',
+    summary: 'Another number or title for a part; refused when somebody changed them in between.',
     body: changePartSchema,
     answer: { status: 200, says: 'The part as changed.', schema: partSchema },
-    refuses: ['notFound', 'taken'],
+    refuses: ['notFound', 'taken', 'stale'],
     async handle({ params, body, request, response }) {
       response.json(valueOf(await changePart(database, params['id'] ?? '', body, personOf(request), now())));
     },

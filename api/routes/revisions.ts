@@ -7,7 +7,7 @@ import type { Database } from '../models/database';
 import { blankPaper } from '../papers/blank-paper';
 import { readRevision, saveRevision } from '../services/revisions';
 import { revisionPaper } from '../services/revision-paper';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 import { valueOf } from './outcome-answer';
 
 const PATH = '/api/parts/:id/revisions/:letter';

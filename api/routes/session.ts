@@ -6,22 +6,22 @@ import { type Person, type Session, sessionSchema, signInSchema } from '../../sh
 import type { Csrf } from '../middleware/csrf';
 import { ProblemError } from '../middleware/problem';
 import { SESSION_COOKIE } from '../middleware/session';
-import { type SignInLimits, signInLimits } from '../middleware/sign-in-limits';
+import type { SignInGuard } from '../middleware/sign-in-limits';
 import type { Database } from '../models/database';
 import { personByPassword } from '../services/people';
 import { describeShop } from '../services/shop';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 
 interface SessionDeps {
   readonly database: Database;
   readonly passport: InstanceType<typeof passportModule.Passport>;
   readonly csrf: Csrf;
-  readonly limits: SignInLimits;
+  readonly guard: SignInGuard;
   readonly version: string;
   readonly now: () => Date;
 }
 
-export function sessionRoutes({ database, passport, csrf, limits, version, now }: SessionDeps): Operation[] {
+export function sessionRoutes({ database, passport, csrf, guard, version, now }: SessionDeps): Operation[] {
   passport.use(
     new Strategy({ usernameField: 'email', session: true }, (email, password, done) => {
       personByPassword(database, email, password).then((person) => done(null, person ?? false), done);
@@ -61,11 +61,12 @@ export function sessionRoutes({ database, passport, csrf, limits, version, now }
       access: 'anybody',
       summary: 'Sign in.',
       body: signInSchema,
-      before: signInLimits(limits),
+      bodyLimit: 16 * 1024,
       answer: { status: 200, says: 'Signed in, with a new token.', schema: sessionSchema },
-      refuses: ['wrongCredentials', 'tooManyAttempts'],
-      async handle({ request, response }) {
-        const person = await authenticate(request, response);
+      refuses: ['wrongCredentials', 'tooManyAttempts', 'unavailable'],
+      async handle({ body: { email }, request, response }) {
+        const who = { email, address: request.ip ?? 'unknown' };
+        const person = await guard.attempt(who, () => authenticate(request, response));
         if (!person) throw new ProblemError('wrongCredentials');
         // A new session id at every sign-in: one that somebody planted before is worth nothing after it.
         await new Promise<void>((resolve, reject) => {

@@ -1,7 +1,7 @@
 /** The engine over HTTP: one document in, its result out. */
 import { solveAnswerSchema, solveRequestSchema } from '../../shared/contracts/solve';
 import { solveRequest } from '../../shared/solve-request';
-import { type Operation, operation } from './operation';
+import { type Operation, operation } from '../operation';
 
 export const solveRoutes = (): Operation[] => [
   operation({

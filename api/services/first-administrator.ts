@@ -1,6 +1,7 @@
 /** The first administrator of a shop of one's own; who comes after is invited by somebody signed in. */
 import { z } from 'zod';
 import type { Person } from '../../shared/contracts/session';
+import { PLAIN_LINE } from '../../shared/part/schema';
 import type { Database } from '../models/database';
 import { hashPassword, passwordFault } from './password';
 import { addPerson } from './people';
@@ -15,26 +16,35 @@ export interface NewAdministrator {
 }
 
 const personal = z.object({
-  email: z.email('That is not an e-mail address.').max(254, 'That is too long for an e-mail address.'),
+  email: z
+    .string()
+    .trim()
+    .pipe(z.email('That is not an e-mail address.').max(254, 'That is too long for an e-mail address.')),
   name: z
     .string()
     .trim()
     .min(1, 'Give a name.')
     .max(100, 'A name has 100 characters at most.')
-    .regex(/^\P{Cc}*$/u, 'A name is one line of plain text.'),
+    .regex(PLAIN_LINE, 'A name is one line of plain text.'),
 });
+
+export const NO_DEMO = 'A demo shop has its demo people and no others.';
+
+/** Null, or what is wrong with the address or the name; to be asked before anything is made. */
+export function personalFault(wanted: Pick<NewAdministrator, 'email' | 'name'>): string | null {
+  const checked = personal.safeParse(wanted);
+  return checked.success ? null : (checked.error.issues[0]?.message ?? 'That is not complete.');
+}
 
 export type Added = { readonly ok: true; readonly person: Person } | { readonly ok: false; readonly message: string };
 
 const no = (message: string): Added => ({ ok: false, message });
 
 export async function addAdministrator(database: Database, wanted: NewAdministrator, now: Date): Promise<Added> {
-  if ((await readShop(database))?.kind !== 'own') return no('A demo shop has its demo people and no others.');
-  const checked = personal.safeParse({ email: wanted.email.trim(), name: wanted.name });
-  if (!checked.success) return no(checked.error.issues[0]?.message ?? 'That is not complete.');
-  const fault = passwordFault(wanted.password);
+  if ((await readShop(database))?.kind !== 'own') return no(NO_DEMO);
+  const fault = personalFault(wanted) ?? passwordFault(wanted.password);
   if (fault !== null) return no(fault);
-  const { email, name } = checked.data;
+  const { email, name } = personal.parse(wanted);
   const passwordHash = await hashPassword(wanted.password);
   return database.write(async (transaction) => {
     const people = await database.people.findAll({ transaction });

@@ -22,6 +22,7 @@ export async function readPart(database: Database, id: string, transaction?: Tra
     id: record.id,
     number: record.number,
     title: record.title,
+    version: record.version,
     createdAt: record.createdAt,
     createdBy: names.get(record.createdBy) ?? '',
     revision,
@@ -62,6 +63,8 @@ export async function createPart(database: Database, part: NewPart, person: Pers
 }
 
 export interface PartChange {
+  /** The version that the change started from. */
+  readonly version: number;
   readonly number?: string | undefined;
   readonly title?: string | undefined;
 }
@@ -77,11 +80,16 @@ export async function changePart(
     const record = await database.parts.findByPk(id, { raw: true, transaction });
     if (!record) return NOT_FOUND;
     const { number = record.number, title = record.title } = change;
+    // What is wanted is there already, as when the answer to the same change was lost.
     if (number === record.number && title === record.title) return found(await readPart(database, id, transaction));
+    if (record.version !== change.version) {
+      const current = await readPart(database, id, transaction);
+      return current ? { ok: false, reason: 'stale', current } : NOT_FOUND;
+    }
     const taken = await numberTaken(database, number, id, transaction);
     if (taken) return taken;
     const keys = partKeys({ number, title, material: record.material });
-    const changed = { changedAt: now.toISOString(), changedBy: person.id };
+    const changed = { changedAt: now.toISOString(), changedBy: person.id, version: record.version + 1 };
     await database.parts.update({ number, title, ...keys, ...changed }, { where: { id }, transaction });
     const revision = await database.revisions.findOne({
       where: { partId: id, letter: record.revision },

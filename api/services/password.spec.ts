@@ -1,3 +1,4 @@
+import bcrypt from 'bcryptjs';
 import { hashPassword, passwordFault, passwordMatches } from './password';
 
 describe('a new password', () => {
@@ -29,6 +30,17 @@ describe('a password', () => {
     expect(await passwordMatches('bend-allowancE', hash)).toBeFalse();
     expect(await passwordMatches('', hash)).toBeFalse();
     expect(await passwordMatches('bend-allowance', null)).toBeFalse();
+  });
+
+  it('of nobody is compared too, with a hash of the same cost, so that the time taken does not tell', async () => {
+    const compare = spyOn<{ compare(password: string, hash: string): Promise<boolean> }>(
+      bcrypt,
+      'compare',
+    ).and.resolveTo(false);
+    expect(await passwordMatches('bend-allowance', null)).toBeFalse();
+    const hash = compare.calls.mostRecent().args[1];
+    expect(hash).toMatch(/^\$2b\$\d\d\$[./A-Za-z0-9]{53}$/);
+    expect(bcrypt.getRounds(hash)).toBe(bcrypt.getRounds(await hashPassword('bend-allowance')));
   });
 
   it('is not taken by its first 72 bytes', async () => {

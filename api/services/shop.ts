@@ -1,12 +1,22 @@
 /** The shop that this data directory belongs to. */
 import type { z } from 'zod';
 import type { shopSchema } from '../../shared/contracts/session';
-import { type Config, StartRefused } from '../config';
+import { type Config, type ShopKind, StartRefused } from '../config';
 import type { Database } from '../models/database';
 import type { ShopRecord } from '../models/shop';
-import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_SHOP_NAME } from '../seeders/demo/demo-people';
+import { DEMO_PASSWORD, DEMO_PEOPLE, DEMO_SHOP_NAME } from '../demo-shop';
 
 const WORDS = { demo: 'a demo shop', own: 'a shop of your own' } as const;
+
+/** The data directory is for another kind of shop than this start. */
+export class OtherShop extends StartRefused {
+  constructor(
+    readonly kind: ShopKind,
+    words: string,
+  ) {
+    super(words);
+  }
+}
 
 export const readShop = (database: Database): Promise<ShopRecord | null> => database.shop.findByPk(1, { raw: true });
 
@@ -25,7 +35,8 @@ export async function openShop(
       return { toFill: true };
     }
     if (shop.kind !== config.shop) {
-      throw new StartRefused(
+      throw new OtherShop(
+        shop.kind,
         `${config.dataDir} holds ${WORDS[shop.kind]}; this start is for ${WORDS[config.shop]}. ` +
           `Set SHOP=${shop.kind}, or give another DATA_DIR.`,
       );

@@ -75,10 +75,9 @@ describe('the handbook channel, from the typed chain to the paper', () => {
 
   it('prints the same figures', async () => {
     for (const size of [/A4/, /Letter/]) {
-      const address = await part.paperAddress(size);
-      const answer = await visitor.context.request.get(address);
-      expect(answer.status()).toBe(200);
-      const text = await readPdf(new Uint8Array(await answer.body()));
+      const { name, bytes } = await part.paper(size);
+      expect(name).toBe('HC-3001-1-A-blank.pdf');
+      const text = await readPdf(bytes);
       for (const figure of [
         'HC-3001-1',
         '3.758',

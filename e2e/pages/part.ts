@@ -1,3 +1,4 @@
+import { readFile } from 'node:fs/promises';
 import type { Locator, Page } from 'playwright-core';
 
 /** The part page: ledger, typed chain, decks, figures. */
@@ -69,17 +70,19 @@ export class Part {
     await this.page.getByRole('button', { name: 'Undo' }).click();
   }
 
-  alerts(): Promise<string[]> {
-    return this.page.getByRole('alert').allInnerTexts();
+  /** Waits until the box for a leg's length says this is wrong with it. */
+  async messageAtLeg(number: number, message: RegExp): Promise<void> {
+    const row = this.page.locator('[data-row]').filter({ has: this.lengthOfLeg(number) });
+    await row.locator('.stop').filter({ hasText: message }).waitFor();
   }
 
-  /** Address of the paper behind the menu "Blank PDF". */
-  async paperAddress(size: RegExp): Promise<string> {
+  /** The paper behind the menu "Blank PDF", as the browser puts it away. */
+  async paper(size: RegExp): Promise<{ name: string; bytes: Uint8Array }> {
     await this.page.getByRole('button', { name: 'Blank PDF' }).click();
-    const item = this.page.getByRole('menuitem', { name: size });
-    await item.waitFor();
-    const address = await item.getAttribute('href');
-    await this.page.keyboard.press('Escape');
-    return address ?? '';
+    const [download] = await Promise.all([
+      this.page.waitForEvent('download'),
+      this.page.getByRole('menuitem', { name: size }).click(),
+    ]);
+    return { name: download.suggestedFilename(), bytes: new Uint8Array(await readFile(await download.path())) };
   }
 }

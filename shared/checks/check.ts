@@ -15,11 +15,6 @@ export interface CheckInput {
 
 export type Check = (input: CheckInput) => readonly Finding[];
 
-/** A name for a leg in a sentence: its own, else "Leg 2" (counted from 1, as people do). */
-export function legName(name: string | null, index: number): string {
-  return name === null || name.trim() === '' ? `Leg ${index + 1}` : name.trim();
-}
-
 /** A least figure in a sentence: rounded up, so that typing it back satisfies the check. @example leastShown(0.165) // '0.165' */
 export function leastShown(value: number): string {
   if (value === 0) return '0';

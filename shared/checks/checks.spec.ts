@@ -115,10 +115,51 @@ describe('radius-below-minimum', () => {
     expect(at(0.3, { grain: 'along' })).toEqual([]);
   });
 
+  it('reads a table by gage, and says that it is known at second hand, where no other has a row', () => {
+    const of = (radius: number, material: string) => at(radius, { material });
+    expect(levelsOf(of(0.2199, '7075-T6'))).toEqual(['caution']);
+    expect(of(0.2199, '7075-T6')[0]!.message).toContain('second hand');
+    expect(of(0.22, '7075-T6')).toEqual([]);
+    expect(levelsOf(of(0.1249, '6061-T6'))).toEqual(['caution']);
+    expect(of(0.125, '6061-T6')).toEqual([]);
+  });
+
   it('says nothing of a material or a thickness that no table holds', () => {
     expect(at(0, { material: 'unobtainable' })).toEqual([]);
     expect(at(0, { material: undefined })).toEqual([]);
     expect(at(0.01, { thickness: 0.9 })).toEqual([]);
+  });
+});
+
+describe('legs-cross', () => {
+  it('names a dozen places of a part wound up in itself, and counts the rest', () => {
+    const legs = (bends: number) => [
+      { leg: 1 },
+      ...Array.from({ length: bends }, () => [bendUp(90, 0.1), { leg: 1 }]).flat(),
+    ];
+    const few = findingsOf('legs-cross', legs(4));
+    expect(few.length).toBeGreaterThan(0);
+    expect(few.some(({ message }) => message.includes('more such places'))).toBeFalse();
+    const many = findingsOf('legs-cross', legs(200));
+    expect(many.length).toBe(12);
+    expect(many[11]!.message).toMatch(/There are \d+ more such places\./);
+  });
+});
+
+describe('radius-not-checked', () => {
+  const at = (more: Record<string, unknown>, chain: unknown[] = [{ leg: 2 }, bendUp(90, 0.16), { leg: 2 }]) =>
+    findingsOf('radius-not-checked', chain, more);
+
+  it('is a note where no table speaks, once a part, and says why', () => {
+    expect(levelsOf(at({ material: 'unobtainable' }))).toEqual(['note']);
+    expect(at({ material: 'unobtainable' })[0]!.message).toContain('unobtainable');
+    expect(at({ material: undefined })[0]!.message).toContain('no material is named');
+    expect(levelsOf(at({ material: '2024-T3', thickness: 0.9 }))).toEqual(['note']);
+  });
+
+  it('is silent where a table speaks, and on a strip without bends', () => {
+    expect(at({ material: '2024-T3' })).toEqual([]);
+    expect(at({ material: undefined }, [{ leg: 2 }])).toEqual([]);
   });
 });
 
@@ -249,6 +290,7 @@ describe('The findings of a part', () => {
       'stop leg-consumed',
       'caution grain-along-bend',
       'caution k-above-half',
+      'note radius-not-checked',
       'note material-unknown',
     ]);
     for (const { message, source } of solved.findings) {

@@ -1,4 +1,5 @@
-import { type Check, leastShown, legName, shown } from './check';
+import { legName } from '../part/words';
+import { type Check, leastShown, shown } from './check';
 
 /** The bends at a leg's ends take more than the leg: flat ≤ 0. Source: geometry. */
 export const legConsumed: Check = ({ figures, layout }) =>

@@ -1,14 +1,22 @@
-import { type Check, legName } from './check';
+import { legName } from '../part/words';
+import type { Check } from './check';
+
+/** Pairs that are named one by one; a part that is wound up in itself would have thousands. */
+const NAMED = 12;
 
 /** The formed part runs into itself. Source: geometry. */
 export const legsCross: Check = ({ figures, crossings }) =>
-  crossings.map(([a, b]) => ({
-    level: 'stop',
-    code: 'legs-cross',
-    at: `chain/${a} chain/${b}`,
-    message: `${pieceName(figures, a)} and ${pieceName(figures, b)} run into each other in the formed part. Change a length or an angle between them.`,
-    source: 'geometry of the formed shape',
-  }));
+  crossings.slice(0, NAMED).map(([a, b], i) => {
+    const more =
+      i === NAMED - 1 && crossings.length > NAMED ? ` There are ${crossings.length - NAMED} more such places.` : '';
+    return {
+      level: 'stop',
+      code: 'legs-cross',
+      at: `chain/${a} chain/${b}`,
+      message: `${pieceName(figures, a)} and ${pieceName(figures, b)} run into each other in the formed part. Change a length or an angle between them.${more}`,
+      source: 'geometry of the formed shape',
+    };
+  });
 
 type Figures = Parameters<Check>[0]['figures'];
 

@@ -9,7 +9,7 @@ export const materialUnknown: Check = ({ figures }) =>
           level: 'note',
           code: 'material-unknown',
           at: '',
-          message: `"${figures.unknownMaterial.slice(0, 60)}" is not in the table of materials: mass and springback are left open. Give its density, modulus and yield stress with the part.`,
+          message: `"${figures.unknownMaterial.slice(0, 60)}" is not in the table of materials: mass and springback are left open. Name one of the table, or give density, modulus and yield stress in the part document.`,
           source: 'table of materials',
         },
       ];

@@ -1,5 +1,6 @@
 import { exceeds } from '../geometry/tolerance';
-import { type Check, legName, shown } from './check';
+import { legName } from '../part/words';
+import { type Check, shown } from './check';
 
 /** A closed bend whose mold point lies off the shorter of its legs: nobody can measure to it. Source: geometry. */
 export const moldPointFar: Check = ({ figures, layout }) =>

@@ -41,7 +41,8 @@ function chosen(rows: readonly MinimumRadius[], rule: string): MinimumRadius | n
   return { ...strictest, upper: Math.max(...rows.map((row) => row.upper)) };
 }
 
-function inWords({ table, lower, upper, column }: MinimumRadius): string {
+function inWords({ table, lower, upper, column, printed }: MinimumRadius): string {
+  if (printed !== null) return `${table}, read at second hand: ${shown(printed)} in at ${shown(column)} in`;
   const times = lower === upper ? `${lower} T` : `${lower} to ${upper} T`;
   return `${table}: ${times} at ${shown(column)} in`;
 }

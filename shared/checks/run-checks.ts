@@ -12,6 +12,7 @@ import { joggleRunSteep } from './joggle-run-steep';
 import { moldPointFar } from './mold-point-far';
 import { noseRadiusMismatch } from './nose-radius-mismatch';
 import { radiusBelowMinimum } from './radius-below-minimum';
+import { radiusNotChecked } from './radius-not-checked';
 import { materialUnknown } from './material-unknown';
 
 const CHECKS: readonly Check[] = [
@@ -27,6 +28,7 @@ const CHECKS: readonly Check[] = [
   joggleRunSteep,
   noseRadiusMismatch,
   moldPointFar,
+  radiusNotChecked,
   materialUnknown,
 ];
 

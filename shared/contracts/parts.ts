@@ -1,5 +1,6 @@
 /** Parts: the register and its rows. */
 import * as z from 'zod';
+import { materialNameSchema, PLAIN_LINE } from '../part/schema';
 import { documentJson, revisionSchema } from './revisions';
 
 export const PART_SORTS = ['number', '-number', 'changed', '-changed', 'title', '-title'] as const;
@@ -8,6 +9,8 @@ export const PART_SORTS = ['number', '-number', 'changed', '-changed', 'title', 
 export const partNumberSchema = z
   .string()
   .trim()
+  // "SP 1" and "SP  1" look alike on paper: they are one number.
+  .overwrite((number) => number.replace(/\s+/g, ' '))
   .min(1, 'Give the part a number.')
   .max(40, 'A part number has 40 characters at most.')
   .regex(/^[A-Za-z0-9][A-Za-z0-9 ./_-]*$/, 'Use letters, digits, spaces and - . / _ and start with a letter or digit.');
@@ -17,11 +20,11 @@ export const partTitleSchema = z
   .trim()
   .min(1, 'Give the part a title.')
   .max(120, 'A title has 120 characters at most.')
-  .regex(/^\P{Cc}*$/u, 'A title is one line of plain text.');
+  .regex(PLAIN_LINE, 'A title is one line of plain text.');
 
 export const listPartsSchema = z.strictObject({
   search: z.string().trim().max(100).optional(),
-  material: z.string().max(60).optional(),
+  material: materialNameSchema.optional(),
   unit: z.enum(['in', 'mm']).optional(),
   sort: z.enum(PART_SORTS).default('-changed'),
   /** Keyset cursor: `next` of the page before. */
@@ -68,6 +71,8 @@ export const createPartSchema = z.strictObject({
 export type CreatePart = z.input<typeof createPartSchema>;
 
 export const changePartSchema = z.strictObject({
+  /** Of the part, as the change started from it. */
+  version: z.number().int().min(1),
   number: partNumberSchema.optional(),
   title: partTitleSchema.optional(),
 });
@@ -77,6 +82,8 @@ export const partSchema = z.object({
   id: z.string(),
   number: z.string(),
   title: z.string(),
+  /** Rises by one whenever number or title change; such a change names the version it started from. */
+  version: z.number().int(),
   createdAt: z.string(),
   createdBy: z.string(),
   revision: revisionSchema,

@@ -12,6 +12,8 @@ export const PROBLEM = {
   taken: '/problems/taken',
   stale: '/problems/stale',
   tooLarge: '/problems/too-large',
+  headersTooLarge: '/problems/headers-too-large',
+  tooSlow: '/problems/too-slow',
   unsupported: '/problems/unsupported',
   unavailable: '/problems/unavailable',
   internal: '/problems/internal',

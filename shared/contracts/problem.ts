@@ -12,7 +12,7 @@ export const problemSchema = z.object({
   status: z.number().int(),
   detail: z.string().optional(),
   errors: z.array(fieldErrorSchema).optional(),
-  /** On a refused save: the revision as it now stands on the server. */
+  /** On a refused save: the revision (or part) as it now stands on the server. */
   current: z.unknown().optional(),
 });
 

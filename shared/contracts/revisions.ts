@@ -1,12 +1,10 @@
 /** Revisions of a part: for now each part has one, a draft. */
 import * as z from 'zod';
-import { documentSchema } from '../part/schema';
 import type { PartDocument } from '../part/document';
 import type { Solved } from '../result';
 
 /** In a request: described as a part document, judged by the engine's own gate (part/restore), which words the errors. */
 export const documentJson = z.unknown().meta({ documents: 'PartDocument' });
-export { documentSchema };
 
 export const revisionSchema = z.object({
   id: z.string(),

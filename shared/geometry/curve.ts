@@ -42,7 +42,7 @@ export function ends(curve: Curve): readonly [XY, XY] {
 }
 
 /** The point of a circle at an angle in degrees. */
-export function arcPoint(arc: Arc, degrees: number): XY {
+export function arcPoint(arc: Pick<Arc, 'centre' | 'radius'>, degrees: number): XY {
   const { x, y } = direction(degrees);
   return [arc.centre[0] + arc.radius * x, arc.centre[1] + arc.radius * y];
 }

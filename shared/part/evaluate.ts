@@ -6,6 +6,7 @@ import type { Allowance, Bend, Joggle, Leg, Measure, Nose, PartDocument, Toleran
 import { isBend, isLeg } from './document';
 import { FieldReader } from './field-reader';
 import type { FigureAllowance, FigureHole, FigureLeg, Joint, PartFigures } from './figures';
+import { measureEnds } from './measure';
 import { evaluateVariables } from './variables';
 
 export type Evaluation =
@@ -90,12 +91,11 @@ function chosenNoses(document: PartDocument): ReadonlySet<number> {
 const turnedOver = (joint: Joint): Joint => ({ ...joint, turn: joint.turn === 'up' ? 'down' : 'up' });
 
 function readLeg(reader: FieldReader, leg: Leg, i: number): FigureLeg {
-  const { measure = 'mold-line' } = leg;
   return {
     chain: i,
     name: leg.name ?? null,
     dimension: reader.length(leg.leg, `chain/${i}/leg`, { above: 0, says: 'The length of a leg' }),
-    measure: typeof measure === 'string' ? [measure, measure] : measure,
+    measure: measureEnds(leg),
   };
 }
 

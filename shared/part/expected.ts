@@ -2,6 +2,9 @@
 
 const EXPRESSION = 'a number or an expression such as 1 1/8 or 25 mm';
 
+const lineOf = (length: string): string =>
+  `one line of plain text of ${length} characters, without control characters and marks that turn the writing around`;
+
 const EXPECTED: ReadonlyMap<string, string> = new Map([
   ['format', '"leafwright/1"'],
   ['unit', '"in" or "mm"'],
@@ -28,9 +31,12 @@ const EXPECTED: ReadonlyMap<string, string> = new Map([
   ['from', '"start", "end", "mold-start" or "mold-end"'],
   ['count', 'a whole number from 1 to 1000'],
   ['seat', 'the index of a leg, counted from 0'],
-  ['name', 'a text of at most 200 characters'],
+  ['name', lineOf('at most 200')],
+  ['title', lineOf('at most 200')],
+  ['dash', lineOf('1 to 20')],
+  ['material/name', lineOf('1 to 100')],
   ['id', 'a text of 1 to 100 characters'],
-  ['material', 'a name, or { name, density, modulus, yield }'],
+  ['material', `a name, ${lineOf('1 to 100')}; or { name, density, modulus, yield }`],
   ['density', 'a density in kg/m³ above 0'],
   ['modulus', 'a modulus in MPa above 0'],
   ['yield', 'a yield stress in MPa above 0'],
@@ -49,6 +55,9 @@ const EXPECTED: ReadonlyMap<string, string> = new Map([
  * @returns e.g. `Expected "in" or "mm".`
  */
 export function expectedAt(path: readonly PropertyKey[]): string {
+  // A material's name is shorter than that of a leg.
+  const own = EXPECTED.get(path.map(String).join('/'));
+  if (own !== undefined) return `Expected ${own}.`;
   for (let i = path.length - 1; i >= 0; i -= 1) {
     const words = EXPECTED.get(String(path[i]));
     if (words !== undefined) return `Expected ${words}.`;

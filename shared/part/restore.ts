@@ -13,6 +13,8 @@ const MOST_HOLES = 2000;
 /** All variables together: past this no person wrote them, and working them out would keep others waiting. */
 const VARIABLES_LENGTH = 200_000;
 const MOST_ERRORS = 50;
+/** Of a name in a path or a message: an answer never grows with what was sent. */
+const LONGEST_NAME = 60;
 
 export type Restored = { readonly ok: true; readonly document: PartDocument } | Refused;
 
@@ -112,16 +114,19 @@ function worded(error: z.ZodError, base: readonly PropertyKey[]): FieldError[] {
   return error.issues.flatMap((issue): FieldError[] => {
     const path = [...base, ...issue.path];
     if (issue.code === 'unrecognized_keys') {
-      return issue.keys.map((key) => ({
+      return issue.keys.slice(0, MOST_ERRORS).map((key) => ({
         path: pathOf([...path, key]),
-        message: `There is no field "${key.slice(0, 60)}" here.`,
+        message: `There is no field "${cut(key)}" here.`,
       }));
     }
     return [{ path: pathOf(path), message: expectedAt(path) }];
   });
 }
 
-const pathOf = (path: readonly PropertyKey[]): string => path.map(String).join('/');
+const pathOf = (path: readonly PropertyKey[]): string => path.map((step) => cut(String(step))).join('/');
+
+/** Never through the middle of a character. */
+const cut = (name: string): string => name.slice(0, LONGEST_NAME).replace(/[\uD800-\uDBFF]$/, '');
 
 function sizeErrors({ holes = [], variables = {} }: PartDocument): FieldError[] {
   const errors: FieldError[] = [];

@@ -7,8 +7,13 @@ z.config({ jitless: true });
 
 const LARGEST_COUNT = 1000;
 
-/** Text for people: any characters, one line of reasonable length. */
-const label = z.string().max(200);
+/**
+ * Text for people, in any writing: one line that shows as it is. No control characters, no halves of a character, and no marks
+ * that turn the direction of the writing around (a number after one reads backwards).
+ */
+export const PLAIN_LINE = /^[^\p{Cc}\p{Cs}\u202A-\u202E\u2066-\u2069]*$/u;
+
+const label = z.string().max(200).regex(PLAIN_LINE);
 const idSchema = z.string().min(1).max(100);
 
 export const expressionSchema = z.union([z.number(), z.string()]).meta({
@@ -71,10 +76,18 @@ export const holeSchema = z.strictObject({
   name: label.optional(),
 });
 
+/** In a document and where parts are looked for by it. */
+export const materialNameSchema = z
+  .string()
+  .trim()
+  .min(1, 'Give the material a name.')
+  .max(100, 'The name of a material has 100 characters at most.')
+  .regex(PLAIN_LINE, 'The name of a material is one line of plain text.');
+
 export const materialSchema = z.union([
-  z.string().min(1).max(100),
+  materialNameSchema,
   z.strictObject({
-    name: z.string().min(1).max(100),
+    name: materialNameSchema,
     density: z.number().positive().optional(),
     modulus: z.number().positive().optional(),
     yield: z.number().positive().optional(),
@@ -86,7 +99,7 @@ const toleranceSchema = z.tuple([expressionSchema, expressionSchema]);
 export const variablesSchema = z.record(z.string(), expressionSchema);
 
 const dashNumberSchema = z.strictObject({
-  dash: z.string().min(1).max(20),
+  dash: z.string().min(1).max(20).regex(PLAIN_LINE),
   variables: variablesSchema.optional(),
   hand: handSchema.optional(),
   title: label.optional(),

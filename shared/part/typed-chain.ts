@@ -11,6 +11,7 @@ import { FUNCTIONS } from '../units/functions';
 import { ANGLE_UNITS, LENGTH_UNITS } from '../units/length';
 import { type ChainEntry, type Expression, isBend, isLeg, type Leg, type Measure, type Turn } from './document';
 import { keepFrom } from './keep-from';
+import { measureEnds } from './measure';
 import { MEASURE_WORDS, splitFirst, unwrap, type Word, wordsOf, wrap } from './typed-words';
 
 export interface TypedError {
@@ -188,8 +189,8 @@ const print = (figure: Expression, oneWord = false): string => wrap(String(figur
 
 const WORD_OF = new Map(Object.entries(MEASURE_WORDS).map(([word, measure]) => [measure, word]));
 
-function measureWords({ measure = 'mold-line' }: Leg): string[] {
-  const [start, end] = typeof measure === 'string' ? [measure, measure] : measure;
+function measureWords(leg: Leg): string[] {
+  const [start, end] = measureEnds(leg);
   if (start === end) return start === 'mold-line' ? [] : [WORD_OF.get(start)!];
   return [WORD_OF.get(start)!, WORD_OF.get(end)!];
 }

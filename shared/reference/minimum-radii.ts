@@ -2,8 +2,9 @@
  * Published minimum radii for 90° cold bends, as multiples of the thickness. Where two tables differ, both are kept:
  * which one rules is the shop's choice.
  */
+import { GAGE_RADII } from './gage-radii';
 
-export type RadiusTable = 'AC 43.13-1B' | 'Aluminum Association';
+export type RadiusTable = 'AC 43.13-1B' | 'Aluminum Association' | 'design handbook' | 'aerospace table';
 
 export interface RadiusRow {
   readonly table: RadiusTable;
@@ -60,6 +61,8 @@ export interface MinimumRadius {
   readonly upper: number;
   /** Thickness of the column that was read, inches. */
   readonly column: number;
+  /** The radius that a table by gage prints, inches; null where the table gives multiples. */
+  readonly printed: number | null;
   readonly source: string;
 }
 
@@ -67,7 +70,8 @@ export interface MinimumRadius {
 const SAME_GAGE = 0.0008;
 
 /**
- * What the tables say of a material at a thickness. Between two columns the thicker one is read.
+ * What the tables say of a material at a thickness. Between two columns the thicker one is read. Tables by gage, which are
+ * known at second hand only, speak where neither of the others does.
  *
  * @param material as a document names it; "Alclad 2024-T3" reads the row of 2024-T3
  * @param inches thickness > 0, inches
@@ -76,13 +80,27 @@ const SAME_GAGE = 0.0008;
  */
 export function minimumRadii(material: string, inches: number): readonly MinimumRadius[] {
   const name = material.replace(/^(?:alclad|clad)\s+/i, '').trim();
-  return MINIMUM_RADII.filter((row) => row.alloyTemper === name).flatMap((row) => {
-    const i = row.thickness.findIndex((column) => inches <= column + SAME_GAGE);
+  const rows = MINIMUM_RADII.filter((row) => row.alloyTemper === name).flatMap((row) => {
+    const i = columnFor(row.thickness, inches);
     const [lower, upper, column] = [row.lower[i], row.upper[i], row.thickness[i]];
     if (lower === undefined || upper === undefined || column === undefined) return [];
-    return [{ table: row.table, lower, upper, column, source: row.source }];
+    return [{ table: row.table, lower, upper, column, printed: null, source: row.source }];
+  });
+  return rows.length > 0 ? rows : gageRadii(name, inches);
+}
+
+function gageRadii(name: string, inches: number): readonly MinimumRadius[] {
+  return GAGE_RADII.filter((row) => row.alloyTemper === name).flatMap((row) => {
+    const i = columnFor(row.thickness, inches);
+    const [printed, column] = [row.radius[i], row.thickness[i]];
+    if (printed === undefined || column === undefined) return [];
+    const times = printed / inches;
+    return [{ table: row.table, lower: times, upper: times, column, printed, source: row.source }];
   });
 }
+
+const columnFor = (thickness: readonly number[], inches: number): number =>
+  thickness.findIndex((column) => inches <= column + SAME_GAGE);
 
 function ac(alloyTemper: string, cells: string): RadiusRow {
   return row('AC 43.13-1B', AC, alloyTemper, AC_THICKNESS, cells);

@@ -1,4 +1,4 @@
-import { formatAngle, formatLength, nearest64, nearest64Of } from './format';
+import { formatAngle, formatLength, missText, nearest64, nearest64Of } from './format';
 import { convertLength } from './length';
 
 describe('formatLength', () => {
@@ -74,6 +74,20 @@ describe('nearest64', () => {
   it('of a millimetre length goes by inches', () => {
     expect(nearest64Of(25.4, 'mm').text).toBe('1');
     expect(nearest64Of(0.5, 'in').text).toBe('1/2');
+  });
+});
+
+describe('missText', () => {
+  it('signs the miss by where the mark lies: before, on or beyond the true length', () => {
+    expect(missText(nearest64(0.8).error)).toBe('−0.003');
+    expect(missText(nearest64(0.79).error)).toBe('+0.007');
+    expect(missText(nearest64(0.5).error)).toBe('±0.000');
+  });
+
+  it('has no sign for what rounds to nothing', () => {
+    expect(missText(nearest64(0.5004).error)).toBe('±0.000');
+    expect(missText(nearest64(0.5006).error)).toBe('−0.001');
+    expect(missText(nearest64(0.4994).error)).toBe('+0.001');
   });
 });
 

@@ -57,6 +57,18 @@ export function nearest64(inches: number): Sixtyfourth {
 }
 
 /**
+ * How far a sixty-fourth lies from the true length: "+0.007" beyond it, "−0.003" before it, "±0.000" on it.
+ *
+ * @param error of `nearest64`, inches
+ * @example missText(nearest64(0.8).error) // '−0.003'
+ */
+export function missText(error: number): string {
+  const miss = fixed(Math.abs(error), PLACES.in);
+  const sign = Number(miss) === 0 ? '±' : error > 0 ? '+' : '−';
+  return `${sign}${miss}`;
+}
+
+/**
  * A length of either unit as the nearest sixty-fourth of an inch.
  *
  * @example nearest64Of(25.4, 'mm').text // '1'

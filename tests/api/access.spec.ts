@@ -33,7 +33,7 @@ const ROWS: readonly Row[] = [
     route: 'patch /api/parts/:id',
     may: 200,
     who: ['designer'],
-    call: (caller, part) => caller.patch(`/api/parts/${part.id}`, { title: 'Another title' }),
+    call: (caller, part) => caller.patch(`/api/parts/${part.id}`, { version: 1, title: 'Another title' }),
   },
   {
     route: 'get /api/parts/:id/revisions/:letter',

@@ -51,10 +51,22 @@ describe('the app’s files', () => {
     expect((await visitor.post('/parts', {})).status).toBe(404);
   });
 
+  it('give the first page to those who read it, by either of its addresses', async () => {
+    expect((await visitor.agent.head('/index.html')).status).toBe(200);
+    for (const method of ['post', 'put', 'patch', 'delete', 'options'] as const) {
+      const answer = await visitor.agent[method]('/index.html');
+      expect(answer.status).withContext(method).toBe(405);
+      expect(answer.headers['allow']).toBe('GET, HEAD');
+      expect(answer.headers['content-type']).toContain('application/problem+json');
+    }
+  });
+
   it('allow no script and no request from elsewhere', async () => {
     const policy = (await navigate('/')).headers['content-security-policy'] ?? '';
     expect(policy).toContain("default-src 'none'");
     expect(policy).toContain("script-src 'self';");
+    expect(policy).toContain("style-src-attr 'none'");
+    expect(policy).toContain("frame-ancestors 'none'");
     expect(policy).not.toContain('upgrade-insecure-requests');
     expect(policy).not.toContain('unsafe-eval');
     expect(policy).not.toContain('unsafe-inline');

@@ -62,6 +62,72 @@ describe('bad input', () => {
     expect((answer.body as Problem).errors).toEqual([{ path: 'colour', message: 'There is no field “colour” here.' }]);
   });
 
+  it('of very many unknown fields, or one with a very long name, gets a short answer', async () => {
+    const many = Object.fromEntries(Array.from({ length: 40_000 }, (_, n) => [`unknown-${n}`, n]));
+    const long = { ['x'.repeat(900_000)]: 1 };
+    const part = { number: 'B-4', title: 'B' };
+    for (const body of [
+      { ...part, ...many, document: CHANNEL },
+      { ...part, ...long, document: CHANNEL },
+      { ...part, document: { ...CHANNEL, ...many } },
+      { ...part, document: { ...CHANNEL, ...long } },
+      { ...part, document: { ...CHANNEL, variables: { ['x'.repeat(900_000)]: {} } } },
+    ]) {
+      const answer = await designer.post('/api/parts', body);
+      expectProblem(answer, 422);
+      expect((answer.body as Problem).errors?.length).toBeLessThanOrEqual(50);
+      expect(answer.text.length).toBeLessThan(20_000);
+    }
+    const cut = (await designer.post('/api/parts', { ...part, ...long, document: CHANNEL })).body as Problem;
+    const name = 'x'.repeat(60);
+    expect(cut.errors).toEqual([{ path: name, message: `There is no field “${name}” here.` }]);
+  });
+
+  it('of more than 16 kB to the sign-in is 413, with that figure', async () => {
+    const visitor = await shop.visitor();
+    const body = (bytes: number): string => `"${'x'.repeat(bytes - 2)}"`;
+    expectProblem(await visitor.raw('post', '/api/session', body(16 * 1024)), 422);
+    const answer = await visitor.raw('post', '/api/session', body(16 * 1024 + 1));
+    expectProblem(answer, 413);
+    expect((answer.body as Problem).detail).toBe('A request may have 16 kB at most.');
+    expect(((await raw(body(1024 * 1024 + 1))).body as Problem).detail).toBe('A request may have 1 MB at most.');
+  });
+
+  it('is answered in words for people, never in those of a library', async () => {
+    const { parts } = (await designer.get('/api/parts')).body as { parts: { id: string }[] };
+    const one = `/api/parts/${parts[0]?.id}`;
+    const values = [undefined, null, '', 5, -1, 1.5, true, 'x'.repeat(5000), [], {}, 2 ** 60];
+    const answers = [
+      await designer.post('/api/parts', { number: 'B-5', title: 'B' }),
+      await designer.get('/api/parts?limit=abc'),
+      await designer.get('/api/parts?limit=0'),
+      await designer.get('/api/parts?limit=201'),
+      await designer.get('/api/parts?sort=colour'),
+      await designer.get('/api/parts?unit=ft'),
+      await designer.get('/api/parts?unit=in&unit=mm'),
+      await designer.get(`/api/parts?search=${'x'.repeat(101)}`),
+      await designer.get('/api/parts?material='),
+      await designer.get(`${one}/revisions/A/blank.pdf?size=a5`),
+    ];
+    for (const value of values) {
+      answers.push(
+        await designer.post('/api/parts', { number: value, title: value }),
+        await designer.patch(one, { version: value, number: 5, title: [] }),
+        await designer.put(`${one}/revisions/A`, { version: value }),
+        await designer.post('/api/session', { email: value, password: 5 }),
+        await designer.post('/api/parts', value ?? null),
+      );
+    }
+    for (const answer of answers) {
+      expectProblem(answer, 422);
+      for (const { message } of (answer.body as Problem).errors ?? []) {
+        expect(message).toMatch(/^[A-Z“].*\.$/);
+        expect(message).not.toMatch(/invalid|received|undefined|NaN|unrecognized|too (small|big)|nonoptional/i);
+      }
+    }
+    expect((answers[0]?.body as Problem).errors).toEqual([{ path: 'document', message: 'This is missing.' }]);
+  });
+
   it('of prototype keys changes nothing', async () => {
     const document = JSON.stringify(CHANNEL);
     for (const extra of ['"__proto__":{"roles":["designer"]}', '"constructor":{"prototype":{"x":1}}']) {

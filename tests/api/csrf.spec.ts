@@ -1,4 +1,4 @@
-import { DEMO_PASSWORD } from '../../api/seeders/demo/demo-people';
+import { DEMO_PASSWORD } from '../../api/demo-shop';
 import { CHANNEL, openTestShop, type TestShop } from '../support/test-shop';
 
 const SIGN_IN = { email: 'designer@harrowcreek.example', password: DEMO_PASSWORD };

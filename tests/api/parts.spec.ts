@@ -99,14 +99,71 @@ describe('parts', () => {
   it('can be given another number and title', async () => {
     const { id } = (await create('T-1')).body as Part;
     shop.passHours(1);
-    const changed = (await designer.patch(`/api/parts/${id}`, { number: 'T-2', title: 'New' }).expect(200))
-      .body as Part;
-    expect([changed.number, changed.title, changed.revision.version]).toEqual(['T-2', 'New', 1]);
+    const change = (more: object) => designer.patch(`/api/parts/${id}`, more);
+    const changed = (await change({ version: 1, number: 'T-2', title: 'New' }).expect(200)).body as Part;
+    expect([changed.number, changed.title, changed.version, changed.revision.version]).toEqual(['T-2', 'New', 2, 1]);
     const found = (await designer.get('/api/parts?search=t-2+new')).body as { parts: { id: string }[] };
     expect(found.parts.map((part) => part.id)).toEqual([id]);
-    await designer.patch(`/api/parts/${id}`, { number: 't-2' }).expect(200);
-    await designer.patch(`/api/parts/${id}`, { number: 'HC-2101-1' }).expect(409);
-    await designer.patch(`/api/parts/${id}`, {}).expect(200);
+    await change({ version: 2, number: 't-2' }).expect(200);
+    await change({ version: 3, number: 'HC-2101-1' }).expect(409);
+    expect(((await change({ version: 3 }).expect(200)).body as Part).version).toBe(3);
+  });
+
+  it('keep what somebody else has changed in between', async () => {
+    const { id, version } = (await create('T-1')).body as Part;
+    expect(version).toBe(1);
+    const change = (more: object) => designer.patch(`/api/parts/${id}`, more);
+    const first = (await change({ version, number: 'T-2' }).expect(200)).body as Part;
+    const late = await change({ version, title: 'Late' });
+    expect(late.status).toBe(409);
+    const problem = late.body as Problem;
+    expect(problem.type).toBe('/problems/stale');
+    expect(problem.detail).toBe('The number or the title was changed in between.');
+    expect(problem.current).toEqual(first);
+    // The same change again, because its answer was lost: it is done already.
+    expect((await change({ version, number: 'T-2' }).expect(200)).body).toEqual(first);
+    expect(((await change({ version: 2, title: 'Late' }).expect(200)).body as Part).number).toBe('T-2');
+    expect((await change({ version: 99, title: 'Later' })).status).toBe(409);
+    for (const wrong of [undefined, 0, '1', 1.5, null]) {
+      const answer = await change({ version: wrong, title: 'X' });
+      expect(answer.status).toBe(422);
+      expect((answer.body as Problem).errors?.[0]?.path).toBe('version');
+    }
+  });
+
+  it('of many changes at once let one through', async () => {
+    const { id } = (await create('T-1')).body as Part;
+    const answers = await Promise.all(
+      ['a', 'b', 'c', 'd'].map((title) => designer.patch(`/api/parts/${id}`, { version: 1, title })),
+    );
+    expect(answers.map((answer) => answer.status).sort()).toEqual([200, 409, 409, 409]);
+  });
+
+  it('have one number however many spaces are in it', async () => {
+    expect(((await create('SP  1').expect(201)).body as Part).number).toBe('SP 1');
+    await create('SP 1').expect(409);
+    await create('SP \t 1').expect(409);
+    await create('SP1').expect(201);
+  });
+
+  it('have titles and materials that show as they are: no marks that turn the writing direction', async () => {
+    for (const bad of ['a\u0085b', 'a\u202eb', 'a\u2066b', 'a\ud800b']) {
+      const raw = JSON.stringify({ number: 'T-1', title: bad, document: CHANNEL });
+      const answer = await designer.raw('post', '/api/parts', raw).expect(422);
+      expect((answer.body as Problem).errors).toEqual([
+        { path: 'title', message: 'A title is one line of plain text.' },
+      ]);
+      expect((await create('T-1', 'Channel', { ...CHANNEL, material: bad })).status).toBe(422);
+    }
+    await create('T-1', 'العربية \u200f עברית').expect(201);
+  });
+
+  it('are found by any material that a part may have', async () => {
+    const material = 'm'.repeat(100);
+    await create('T-1', 'Channel', { ...CHANNEL, material: ` ${material} ` }).expect(201);
+    const found = (await designer.get(`/api/parts?material=${material}`).expect(200)).body as { total: number };
+    expect(found.total).toBe(1);
+    await designer.get(`/api/parts?material=${material}m`).expect(422);
   });
 
   it('that are not there are not found, whatever stands in their place', async () => {
@@ -114,7 +171,7 @@ describe('parts', () => {
       const path = `/api/parts/${encodeURIComponent(id)}`;
       const answers = [
         await designer.get(path),
-        await designer.patch(path, { title: 'x' }),
+        await designer.patch(path, { version: 1, title: 'x' }),
         await designer.get(`${path}/revisions/A`),
         await designer.put(`${path}/revisions/A`, { version: 1, document: CHANNEL }),
         await designer.get(`${path}/revisions/A/blank.pdf`),

@@ -2,7 +2,7 @@ import type { Part } from '../../shared/contracts/parts';
 import type { Problem } from '../../shared/contracts/problem';
 import type { Revision } from '../../shared/contracts/revisions';
 import type { PartDocument } from '../../shared/part/document';
-import { DEMO_PASSWORD } from '../../api/seeders/demo/demo-people';
+import { DEMO_PASSWORD } from '../../api/demo-shop';
 import { addPerson } from '../../api/services/people';
 import { hashPassword } from '../../api/services/password';
 import { type Caller, CHANNEL, openTestShop, type TestShop } from '../support/test-shop';
@@ -29,6 +29,15 @@ describe('revisions', () => {
   afterEach(() => shop.close());
 
   const save = (version: number, document: unknown) => designer.put(path, { version, document });
+
+  const secondDesigner = async (): Promise<Caller> => {
+    const passwordHash = await hashPassword(DEMO_PASSWORD, 4);
+    const second = { email: 'second@harrowcreek.example', name: 'Wenna Tarrow', roles: ['designer' as const] };
+    await shop.database.write((t) => addPerson(shop.database, { ...second, passwordHash }, shop.clock.now, t));
+    const other = await shop.visitor();
+    await other.signIn(second.email, DEMO_PASSWORD);
+    return other;
+  };
 
   it('are computed again with every save', async () => {
     const saved = (await save(1, withWeb(3)).expect(200)).body as Revision;
@@ -75,6 +84,12 @@ describe('revisions', () => {
     await save(1, withWeb(3.5)).expect(409);
   });
 
+  it('do not take the same document from somebody else for the same save', async () => {
+    const other = await secondDesigner();
+    await save(1, withWeb(3)).expect(200);
+    expect((await other.put(path, { version: 1, document: withWeb(3) })).status).toBe(409);
+  });
+
   it('let one of many saves at once through', async () => {
     const answers = await Promise.all([3, 4, 5, 6, 7].map((web) => save(1, withWeb(web))));
     expect(answers.map((answer) => answer.status).sort()).toEqual([200, 409, 409, 409, 409]);
@@ -107,11 +122,7 @@ describe('revisions', () => {
   });
 
   it('record everybody who has edited them, from when to when', async () => {
-    const passwordHash = await hashPassword(DEMO_PASSWORD, 4);
-    const second = { email: 'second@harrowcreek.example', name: 'Wenna Tarrow', roles: ['designer' as const] };
-    await shop.database.write((t) => addPerson(shop.database, { ...second, passwordHash }, shop.clock.now, t));
-    const other = await shop.visitor();
-    await other.signIn(second.email, DEMO_PASSWORD);
+    const other = await secondDesigner();
     await other.put(path, { version: 1, document: withWeb(3) }).expect(200);
     shop.passHours(1);
     const saved = (await save(2, withWeb(4)).expect(200)).body as Revision;
@@ -122,6 +133,14 @@ describe('revisions', () => {
       ['08', '10'],
       ['09', '09'],
     ]);
+  });
+
+  it('count another number or title of the part as an edit', async () => {
+    const other = await secondDesigner();
+    const renamed = (await other.patch(`/api/parts/${part.id}`, { version: 1, title: 'Hat' }).expect(200)).body as Part;
+    expect(renamed.revision.editors).toEqual(['Ilka Dornbach', 'Wenna Tarrow']);
+    const [kept] = await shop.database.revisionEditors.findAll({ where: { firstEditAt: '2026-03-02T09:00:00.000Z' } });
+    expect(kept?.revisionId).toBe(renamed.revision.id);
   });
 
   it('come as a paper with the number of the part in its name', async () => {

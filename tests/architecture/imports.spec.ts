@@ -59,6 +59,15 @@ describe('import directions', () => {
   it('have no circles at run time', () => {
     expect(circlesOf([...shared, ...api, ...src])).toEqual([]);
   });
+
+  it('have no circles between the folders of the API either (types aside)', () => {
+    const folder = (path: string): string => path.split('/').slice(0, 2).join('/');
+    const between = api
+      .filter(({ from, own, to }) => own && room(to) === 'api' && !from.endsWith('.spec.ts'))
+      .map((each) => ({ ...each, from: folder(each.from), to: folder(each.to) }))
+      .filter(({ from, to }) => from !== to);
+    expect(circlesOf(between)).toEqual([]);
+  });
 });
 
 function circlesOf(imports: Import[]): string[] {

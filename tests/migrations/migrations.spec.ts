@@ -75,6 +75,8 @@ describe('migrations', () => {
       const listed = await listParts(database, listPartsSchema.parse({ sort: 'number' }));
       if (!listed.ok) throw new Error('The register did not open.');
       expect(listed.value.parts.map((part) => part.number)).toEqual(['HC-2102-1', 'HC-2107-1']);
+      const versions = listed.value.parts.map(async ({ id }) => (await readPart(database, id))?.version);
+      expect(await Promise.all(versions)).toEqual([1, fixture < '0002' ? 1 : 3]);
       const channel = await readPart(database, listed.value.parts[0]!.id);
       expect(channel?.revision.result.developedLength).toBeCloseTo(3.758, 3);
       expect(channel?.revision.editors).toEqual(['Ilka Dornbach']);

@@ -22,4 +22,6 @@ export function refusalOf(document: unknown): readonly FieldError[] {
   return result.ok ? [] : result.errors;
 }
 
-export const codesOf = (solved: Solved): readonly string[] => solved.findings.map((finding) => finding.code);
+/** Stops and cautions; notes, such as that no table was asked about the radius, are no defect of a plain part. */
+export const codesOf = (solved: Solved): readonly string[] =>
+  solved.findings.filter(({ level }) => level !== 'note').map(({ code }) => code);

@@ -7,8 +7,9 @@ import supertest from 'supertest';
 import { createApp } from '../../api/app';
 import { makeLog } from '../../api/middleware/request-log';
 import type { SignInLimits } from '../../api/middleware/sign-in-limits';
+import type { Waits } from '../../api/models/database';
 import { openShopDatabase } from '../../api/open-shop-database';
-import { DEMO_PASSWORD } from '../../api/seeders/demo/demo-people';
+import { DEMO_PASSWORD } from '../../api/demo-shop';
 import { seedDemo } from '../../api/seeders/demo/seed-demo';
 import { hashPassword } from '../../api/services/password';
 import type { Role, Session } from '../../shared/contracts/session';
@@ -20,6 +21,9 @@ const quickHash = (password: string): Promise<string> => hashPassword(password, 
 export interface TestShopOptions {
   readonly shop?: 'demo' | 'own';
   readonly signInLimits?: SignInLimits;
+  readonly trustedProxies?: number;
+  /** How long writers wait, for a test in which they wait in vain. */
+  readonly waits?: Waits;
   /** Files of a built app, by name. */
   readonly appFiles?: Readonly<Record<string, string>>;
   readonly log?: DestinationStream;
@@ -32,14 +36,19 @@ export async function openTestShop(options: TestShopOptions = {}) {
   for (const [name, text] of Object.entries(options.appFiles ?? {})) writeFileSync(join(appFolder, name), text);
   const clock = { now: new Date('2026-03-02T08:00:00.000Z') };
   const config = { dataDir: join(folder, 'data'), shop: options.shop ?? 'demo', shopName: null } as const;
-  const database = await openShopDatabase(config, clock.now, (db, now) => seedDemo(db, now, quickHash));
+  const database = await openShopDatabase(
+    config,
+    clock.now,
+    (db, now) => seedDemo(db, now, quickHash),
+    options.waits,
+  );
   const app = createApp({
     database,
     secret: 'a secret of the tests, longer than thirty-two characters',
     log: makeLog({ logLevel: options.log ? 'info' : 'silent' }, options.log),
     version: '0.0.0',
     appFolder,
-    trustedProxies: 0,
+    trustedProxies: options.trustedProxies ?? 0,
     now: () => clock.now,
     ...(options.signInLimits ? { signInLimits: options.signInLimits } : {}),
   });

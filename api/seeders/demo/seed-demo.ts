@@ -1,12 +1,12 @@
 /** Fills a new demo shop: its people, and its parts by the same way that everybody's parts are saved. */
 import type { Transaction } from 'sequelize';
 import type { Person } from '../../../shared/contracts/session';
+import { DEMO_PASSWORD, DEMO_PEOPLE } from '../../demo-shop';
 import type { Database } from '../../models/database';
 import { createPart } from '../../services/parts';
 import { hashPassword } from '../../services/password';
 import { addPerson } from '../../services/people';
 import { DEMO_PARTS } from './demo-parts';
-import { DEMO_PASSWORD, DEMO_PEOPLE } from './demo-people';
 
 const MINUTE = 60 * 1000;
 

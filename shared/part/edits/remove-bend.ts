@@ -1,5 +1,6 @@
-import type { Expression, Leg, Measure, PartDocument } from '../document';
+import type { Expression, Leg, PartDocument } from '../document';
 import { isLeg } from '../document';
+import { measureEnds } from '../measure';
 import { legNumberAt, renumberLegs } from './entry';
 
 function sum(a: Expression, b: Expression): Expression {
@@ -8,14 +9,9 @@ function sum(a: Expression, b: Expression): Expression {
   return `${a} + ${b}`;
 }
 
-function ends(leg: Leg): readonly [Measure, Measure] {
-  const measure = leg.measure ?? 'mold-line';
-  return typeof measure === 'string' ? [measure, measure] : measure;
-}
-
 function join(first: Leg, second: Leg): Leg {
-  const start = ends(first)[0];
-  const end = ends(second)[1];
+  const start = measureEnds(first)[0];
+  const end = measureEnds(second)[1];
   const name = first.name ?? second.name;
   const id = first.id ?? second.id;
   return {

@@ -1,5 +1,6 @@
 import type { Measure, PartDocument } from '../document';
 import { isLeg } from '../document';
+import { measureEnds } from '../measure';
 import { replaceEntry } from './entry';
 
 /**
@@ -13,7 +14,7 @@ export function setMeasure(
 ): PartDocument {
   return replaceEntry(document, index, (entry) => {
     if (!isLeg(entry)) return entry;
-    const [start, end] = typeof measure === 'string' ? [measure, measure] : measure;
+    const [start, end] = measureEnds({ measure });
     const { measure: former, ...rest } = entry;
     if (start !== end) return { ...rest, measure: [start, end] };
     if (start === 'mold-line') return former === undefined ? entry : rest;

@@ -1,26 +1,34 @@
 /** What each bend line is called and how it is bent, under the blank: on one line where it fits, else stacked. */
+import { inOneLine, type LineNote } from '@shared/part/words';
 import type { Mark } from './marks';
 import { at, textWidth } from './marks';
-import { seatLabels } from './spread';
+import { seatLabels } from './seat-labels';
 
 export interface BendNote {
   readonly x: number;
-  /** "L2", "face B up", "90°". */
-  readonly parts: readonly [string, string, string];
+  readonly note: LineNote;
   readonly pick: number;
-  readonly selected: boolean;
 }
 
 const GAP = 12;
 const LINE = 16;
 
-const whole = (note: BendNote): string => note.parts.join(' · ');
-const widest = (texts: readonly string[]): number =>
-  Math.max(0, ...texts.map((text) => textWidth(text, 'note-strong')));
-const stackedWidth = (notes: readonly BendNote[]): number => widest(notes.flatMap((note) => note.parts));
+/** From the fullest to the least: ledger and table of stations have the angle between the legs where it has no room here. */
+const WAYS: readonly ((note: LineNote) => readonly string[])[] = [
+  (note) => [inOneLine(note)],
+  ({ line, face, angle, between }) => [line, face, angle, between],
+  ({ line, face, angle }) => [line, face, angle],
+];
 
-/** Length in pixels that the notes need side by side when they are stacked. */
-export const notesRoom = (notes: readonly BendNote[]): number => notes.length * (stackedWidth(notes) + GAP);
+/** Most of the texts are the same for every bend: each is measured once. */
+const widest = (texts: readonly string[]): number =>
+  Math.max(0, ...[...new Set(texts)].map((text) => textWidth(text, 'note-strong')));
+
+/** Length in pixels that the notes need side by side at the least. */
+export function notesRoom(notes: readonly LineNote[]): number {
+  const least = WAYS.at(-1);
+  return least ? notes.length * (widest(notes.flatMap(least)) + GAP) : 0;
+}
 
 export interface NoteBand {
   readonly marks: readonly Mark[];
@@ -29,36 +37,40 @@ export interface NoteBand {
 
 export function bendNotes(notes: readonly BendNote[], edge: number, low: number, high: number): NoteBand {
   if (notes.length === 0) return { marks: [], height: 0 };
-  const width = widest(notes.map(whole));
-  const inLine = notes.every((note, index) => index === 0 || note.x - (notes[index - 1]?.x ?? 0) >= width + GAP);
-  const stacked = !inLine;
-  const room = stacked ? stackedWidth(notes) : width;
-  const inset = room / 2;
+  const ways = WAYS.map((way) => notes.map(({ note }) => way(note)));
+  const fits = (texts: readonly (readonly string[])[]): boolean => {
+    const room = widest(texts.flat()) + GAP;
+    // One line has no leader, so that each must stand at its own place.
+    const apart = notes.every((note, index) => index === 0 || note.x - (notes[index - 1]?.x ?? 0) >= room);
+    return (texts[0]?.length === 1 ? apart : true) && notes.length * room <= high - low;
+  };
+  const texts = ways.find(fits) ?? ways.at(-1) ?? [];
+  const rows = texts[0]?.length ?? 0;
+  const width = widest(texts.flat());
   const seats = seatLabels(
     notes.map((note) => note.x),
-    room,
+    width,
     GAP,
-    low + inset,
-    high - inset,
+    low + width / 2,
+    high - width / 2,
     1,
   );
-  const top = edge + (stacked ? 26 : 18);
+  const top = edge + (rows > 1 ? 26 : 18);
   const marks = notes.flatMap((note, index): Mark[] => {
     const x = seats[index]?.place ?? note.x;
-    const common = { pick: note.pick, selected: note.selected, anchor: 'middle' } as const;
-    if (!stacked) return [{ kind: 'text', role: 'note', text: whole(note), at: { x, y: top }, ...common }];
+    const { pick } = note;
     const leader = [
       { x: note.x, y: edge + 2 },
       { x: note.x, y: edge + 6 },
       { x, y: edge + 16 },
     ];
     return [
-      { kind: 'path', role: 'leader', d: `M${leader.map(at).join('L')}`, pick: note.pick, selected: note.selected },
-      ...note.parts.map((text, line): Mark => {
-        const role = line === 0 ? 'note-strong' : 'note';
-        return { kind: 'text', role, text, at: { x, y: top + line * LINE }, ...common };
+      ...(rows > 1 ? [{ kind: 'path', role: 'leader', d: `M${leader.map(at).join('L')}`, pick } as const] : []),
+      ...(texts[index] ?? []).map((text, row): Mark => {
+        const role = rows > 1 && row === 0 ? 'note-strong' : 'note';
+        return { kind: 'text', role, text, at: { x, y: top + row * LINE }, anchor: 'middle', pick };
       }),
     ];
   });
-  return { marks, height: top - edge + (stacked ? 2 * LINE : 0) + 10 };
+  return { marks, height: top - edge + (rows - 1) * LINE + 10 };
 }

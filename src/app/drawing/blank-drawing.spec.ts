@@ -4,10 +4,8 @@ import { type TextMark, textBox } from './marks';
 import { samplePart, solved, thousandths } from './sample-parts';
 import type { PartDocument } from '@shared/part/document';
 
-const noteOf = (bend: number): [string, string, string] => [`L${bend + 1}`, 'face B up', '90°'];
-
 function drawn(part: PartDocument, lines: BlankLines, width = 950): BlankDrawing | null {
-  return blankDrawing(solved(part), { width, lines, selected: null, figureOf: thousandths, noteOf, grain: 'across' });
+  return blankDrawing(solved(part), { width, lines, figureOf: thousandths, grain: 'across' });
 }
 
 const texts = (drawing: BlankDrawing): TextMark[] =>
@@ -34,6 +32,18 @@ describe('the blank drawing', () => {
         }
       }
     }
+  });
+
+  it('notes every bend: in one line, in four under each other, or in three, by the room', () => {
+    const notes = (bends: number, width: number): string[] =>
+      texts(drawn(samplePart('tray', bends), 'tangents', width)!)
+        .filter((text) => text.role.startsWith('note'))
+        .map(({ text }) => text);
+    expect(notes(2, 950)).toContain('L2 · face A up · 90° (90° between legs)');
+    expect(notes(4, 560)).toContain('90° between legs');
+    expect(notes(4, 560).length).toBe(4 * 4);
+    expect(notes(24, 358)).not.toContain('90° between legs');
+    expect(notes(24, 358).length).toBe(24 * 3);
   });
 
   it('gives every station of the lines that are shown, and both ends', () => {

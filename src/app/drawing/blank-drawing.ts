@@ -1,4 +1,5 @@
 /** The blank deck: the strip with its bend zones and lines, laid out lengthways to scale like a tape. */
+import { lineNote } from '@shared/part/words';
 import type { BendResult, Solved } from '@shared/result';
 import type { BendNote } from './bend-notes';
 import { bendNotes, notesRoom } from './bend-notes';
@@ -6,7 +7,7 @@ import { breakMarks, sheetMarks } from './blank-sheet';
 import type { Drawing, Mark } from './marks';
 import { linePath } from './marks';
 import type { Station } from './station-labels';
-import { stationLabels, stationRoom } from './station-labels';
+import { seatStations, stationMarks, stationRoom } from './station-labels';
 
 export type BlankLines = 'tangents' | 'sight lines' | 'both';
 export const BLANK_LINES: readonly BlankLines[] = ['tangents', 'sight lines', 'both'];
@@ -15,9 +16,7 @@ export interface BlankOptions {
   /** Room there is; the drawing gets wider, never more crowded, when its figures need it. */
   readonly width: number;
   readonly lines: BlankLines;
-  readonly selected: number | null;
   readonly figureOf: (length: number) => string;
-  readonly noteOf: (bend: number) => readonly [string, string, string];
   readonly grain: 'along' | 'across' | null;
 }
 
@@ -50,14 +49,13 @@ export function blankDrawing(solved: Solved, options: BlankOptions): BlankDrawin
   const bottom = options.lines === 'both' ? sightStations(bends, options) : [];
   const notes = bends.map((bend, index): Omit<BendNote, 'x'> & { at: number } => ({
     at: bend.centre,
-    parts: options.noteOf(index),
+    note: lineNote(bend, index),
     pick: bend.chain,
-    selected: bend.chain === options.selected,
   }));
   const needed = Math.max(
     stationRoom(top) + 2 * MARGIN,
     stationRoom(bottom) + 2 * MARGIN,
-    notesRoom(notes.map((note) => ({ ...note, x: 0 }))) + 24,
+    notesRoom(notes.map(({ note }) => note)) + 24,
   );
   const width = Math.max(options.width, Math.ceil(needed));
   const scale = (width - 2 * MARGIN) / length;
@@ -68,11 +66,10 @@ export function blankDrawing(solved: Solved, options: BlankOptions): BlankDrawin
   const widthToScale = trueHeight > 0 && Math.abs(height - trueHeight) < 0.5;
   const placed = (stations: readonly StationAt[]): Station[] => stations.map((one) => ({ ...one, x: x(one.at) }));
 
-  const above = stationLabels(placed(top), 0, -1, MARGIN, width - MARGIN);
-  const edge = above.height + 6;
+  const heads = seatStations(placed(top), MARGIN, width - MARGIN);
+  const edge = heads.height + 6;
   const foot = edge + height;
-  const heads = stationLabels(placed(top), edge, -1, MARGIN, width - MARGIN);
-  const feet = bottom.length > 0 ? stationLabels(placed(bottom), foot, 1, MARGIN, width - MARGIN) : null;
+  const feet = bottom.length > 0 ? seatStations(placed(bottom), MARGIN, width - MARGIN) : null;
   const under = foot + (feet?.height ?? 0);
   const band = bendNotes(
     notes.map((note) => ({ ...note, x: x(note.at) })),
@@ -84,8 +81,8 @@ export function blankDrawing(solved: Solved, options: BlankOptions): BlankDrawin
     ...sheetMarks(solved, { x, top: edge, foot, ...options }),
     ...lineMarks(bends, x, edge, foot, options),
     ...(widthToScale ? [] : breakMarks(MARGIN, width - MARGIN, edge, foot)),
-    ...heads.marks,
-    ...(feet?.marks ?? []),
+    ...stationMarks(heads, edge, -1),
+    ...(feet ? stationMarks(feet, foot, 1) : []),
     ...band.marks,
   ];
   return { width, height: under + Math.max(band.height, 8) + 4, marks, widthToScale };
@@ -96,8 +93,8 @@ type StationAt = Omit<Station, 'x'> & { readonly at: number };
 function topStations(bends: readonly Placed[], length: number, options: BlankOptions): StationAt[] {
   const { figureOf, lines } = options;
   const ends: StationAt[] = [
-    { at: 0, text: '0', role: 'end-station', leader: true },
-    { at: length, text: figureOf(length), role: 'end-station', leader: true },
+    { at: 0, text: '0', role: 'end-station' },
+    { at: length, text: figureOf(length), role: 'end-station' },
   ];
   return [...ends, ...(lines === 'sight lines' ? sightStations(bends, options) : tangentStations(bends, options))];
 }
@@ -110,20 +107,18 @@ const sightLines = ({ sightLine }: BendResult): readonly (readonly [number, Side
         [sightLine.endUnderNose, 'far'],
       ];
 
-function tangentStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
+function tangentStations(bends: readonly Placed[], { figureOf }: BlankOptions): StationAt[] {
   return bends.flatMap((bend) =>
     [bend.tangentStart, bend.tangentEnd].map((at): StationAt => {
-      const common = { pick: bend.chain, selected: bend.chain === selected };
-      return { at, text: figureOf(at), role: 'station', leader: true, ...common };
+      return { at, text: figureOf(at), role: 'station', pick: bend.chain };
     }),
   );
 }
 
-function sightStations(bends: readonly Placed[], { figureOf, selected }: BlankOptions): StationAt[] {
+function sightStations(bends: readonly Placed[], { figureOf }: BlankOptions): StationAt[] {
   return bends.flatMap((bend) =>
     sightLines(bend).map(([at, side]): StationAt => {
-      const common = { pick: bend.chain, selected: bend.chain === selected };
-      return { at, text: `${figureOf(at)} ${SIDE_LETTERS[side]}`, role: 'station', leader: true, ...common };
+      return { at, text: `${figureOf(at)} ${SIDE_LETTERS[side]}`, role: 'station', pick: bend.chain };
     }),
   );
 }
@@ -134,11 +129,11 @@ function lineMarks(
   x: (station: number) => number,
   top: number,
   foot: number,
-  { lines, selected }: BlankOptions,
+  { lines }: BlankOptions,
 ): Mark[] {
   const down = (at: number): string => linePath({ x: x(at), y: top }, { x: x(at), y: foot });
   return bends.flatMap((bend): Mark[] => {
-    const common = { pick: bend.chain, selected: bend.chain === selected };
+    const common = { pick: bend.chain };
     const marks: Mark[] = [
       { kind: 'path', role: 'centre', d: down(bend.centre), ...common },
       { kind: 'path', role: 'tangent', d: down(bend.tangentStart) + down(bend.tangentEnd), ...common },

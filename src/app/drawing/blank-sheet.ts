@@ -7,7 +7,6 @@ export interface SheetPlace {
   readonly x: (station: number) => number;
   readonly top: number;
   readonly foot: number;
-  readonly selected: number | null;
   readonly figureOf: (length: number) => string;
   readonly grain: 'along' | 'across' | null;
 }
@@ -16,30 +15,23 @@ const box = (left: number, top: number, right: number, foot: number): string =>
   `M${left} ${top}H${right}V${foot}H${left}Z`;
 
 export function sheetMarks(solved: Solved, place: SheetPlace): Mark[] {
-  const { x, top, foot, selected } = place;
+  const { x, top, foot } = place;
   const end = solved.developedLength ?? 0;
   const zones = solved.bends.flatMap((bend): Mark[] => {
     if (bend.tangentStart === null || bend.tangentEnd === null) return [];
-    const common = { pick: bend.chain, selected: bend.chain === selected };
-    return [{ kind: 'path', role: 'zone', d: box(x(bend.tangentStart), top, x(bend.tangentEnd), foot), ...common }];
+    const d = box(x(bend.tangentStart), top, x(bend.tangentEnd), foot);
+    return [{ kind: 'path', role: 'zone', d, pick: bend.chain }];
   });
   const legs = solved.legs.filter(isPlaced);
-  const picked = legs
-    .filter((leg) => leg.chain === selected)
-    .map((leg): Mark => {
-      const d = box(x(leg.start), top, x(leg.end), foot);
-      return { kind: 'path', role: 'zone', d, pick: leg.chain, selected: true };
-    });
-  const hits = legs.map((leg): Mark => {
-    return { kind: 'path', role: 'hit', d: box(x(leg.start), top, x(leg.end), foot), pick: leg.chain };
-  });
+  // A leg is seen as one when it is selected; the hit over the edge is what a pointer finds.
+  const flats = legs.map((leg) => ({ d: box(x(leg.start), top, x(leg.end), foot), pick: leg.chain }));
   const grainLeg = place.grain ? roomiest(legs, place) : null;
   return [
     { kind: 'path', role: 'sheet', d: box(x(0), top, x(end), foot) },
     ...zones,
-    ...picked,
+    ...flats.map((flat): Mark => ({ kind: 'path', role: 'leg', ...flat })),
     { kind: 'path', role: 'edge', d: box(x(0), top, x(end), foot) },
-    ...hits,
+    ...flats.map((flat): Mark => ({ kind: 'path', role: 'hit', ...flat })),
     ...legs.flatMap((leg) => flatMarks(leg, place, leg === grainLeg)),
     ...(grainLeg && place.grain ? grainMarks(grainLeg, place, place.grain) : []),
   ];
@@ -66,7 +58,7 @@ function flatMarks(leg: PlacedLeg, place: SheetPlace, withGrain: boolean): Mark[
   const figure = figureOf(leg.flat);
   const middle = (x(leg.start) + x(leg.end)) / 2;
   const centre = (top + foot) / 2 + (withGrain ? 14 : 0);
-  const common = { kind: 'text', anchor: 'middle', pick: leg.chain, selected: leg.chain === place.selected } as const;
+  const common = { kind: 'text', anchor: 'middle', pick: leg.chain } as const;
   const text = (words: string, y: number, role: TextMark['role']): TextMark => {
     return { ...common, role, text: words, at: { x: middle, y } };
   };
@@ -97,7 +89,7 @@ function grainMarks(leg: PlacedLeg, { x, top, foot }: SheetPlace, grain: 'along'
   const middle = (x(leg.start) + x(leg.end)) / 2;
   const y = (top + foot) / 2 - 14;
   const label = (at: number): Mark => {
-    return { kind: 'text', role: 'label', text: 'grain', at: { x: at, y }, anchor: 'start', pick: leg.chain };
+    return { kind: 'text', role: 'label', text: 'grain', at: { x: at, y }, anchor: 'start' };
   };
   if (grain === 'across') {
     const left = middle - 30;

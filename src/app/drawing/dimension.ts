@@ -17,7 +17,8 @@ const TAIL = 18;
 export type FigurePlace = 'between' | 'past-start' | 'past-end';
 
 export interface DimensionPlan {
-  readonly marks: readonly Mark[];
+  /** Made only for the plan that is chosen among many. */
+  readonly marks: () => readonly Mark[];
   readonly footprint: Footprint;
 }
 
@@ -46,34 +47,34 @@ export function planDimension(
     (width / 2 + 4) / Math.max(Math.abs(u.x), 1e-6),
     (TEXT_SIZE.figure / 2 + 3) / Math.max(Math.abs(u.y), 1e-6),
   );
+  const fits = length >= 2 * (half + ARROW + 3);
+  if (fits !== (figure === 'between')) return null;
   const thin = [from, to].map((foot): Segment => {
     const reach = Math.max(offset + OVER, GAP + 1);
     return { from: along(foot, outward, GAP), to: along(foot, outward, reach) };
   });
   const role = 'figure' as const;
   let lines: Segment[];
-  let heads: string[];
+  let heads: () => string[];
   let centre: Point;
   if (figure === 'between') {
-    if (length < 2 * (half + ARROW + 3)) return null;
     centre = middle(a, b);
     lines = [
       { from: a, to: along(centre, u, -half) },
       { from: along(centre, u, half), to: b },
     ];
-    heads = [arrow(a, u), arrow(b, { x: -u.x, y: -u.y })];
+    heads = () => [arrow(a, u), arrow(b, { x: -u.x, y: -u.y })];
   } else {
-    if (length >= 2 * (half + ARROW + 3)) return null;
     centre = figure === 'past-start' ? along(a, u, -(TAIL + half)) : along(b, u, TAIL + half);
     lines = [{ from: along(a, u, -TAIL), to: along(b, u, TAIL) }];
-    heads = [arrow(a, { x: -u.x, y: -u.y }), arrow(b, u)];
+    heads = () => [arrow(a, { x: -u.x, y: -u.y }), arrow(b, u)];
   }
   const figureMark = { kind: 'text', role, text, at: centre, anchor: 'middle', ...common } as const;
-  const path = [...thin, ...lines].map((line) => linePath(line.from, line.to)).join('');
+  const path = (): string => [...thin, ...lines].map((line) => linePath(line.from, line.to)).join('');
   return {
-    marks: [
-      { kind: 'path', role: 'dimension', d: path, ...common },
-      { kind: 'path', role: 'arrow', d: heads.join(''), ...common },
+    marks: () => [
+      { kind: 'path', role: 'dimension', d: path(), ...common },
+      { kind: 'path', role: 'arrow', d: heads().join(''), ...common },
       figureMark,
     ],
     footprint: { texts: [textBox(figureMark)], lines, thin },

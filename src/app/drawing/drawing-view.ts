@@ -8,8 +8,8 @@ import {
   viewChild,
   ViewEncapsulation,
 } from '@angular/core';
-import type { Drawing } from './marks';
-import { paint } from './paint';
+import { type Drawing, NO_OVERLAY } from './marks';
+import { Paper } from './paint';
 
 /** A drawing on the page. What it says in words is the caller's to give: as `label` here and as text beside it. */
 @Component({
@@ -25,6 +25,9 @@ import { paint } from './paint';
 export class DrawingView {
   readonly drawing = input.required<Drawing>();
   readonly label = input.required<string>();
+  /** The entry of the chain that is marked, and what is laid over the drawing for it. */
+  readonly selected = input<number | null>(null);
+  readonly overlay = input(NO_OVERLAY);
   /** The metal is seen flat, not cut. */
   readonly flat = input(false);
   /** The entry of the chain that was clicked, or null beside all of them. */
@@ -33,7 +36,15 @@ export class DrawingView {
   private readonly paper = viewChild.required<ElementRef<SVGSVGElement>>('paper');
 
   constructor() {
-    afterRenderEffect({ write: () => paint(this.paper().nativeElement, this.drawing()) });
+    let paper: Paper | null = null;
+    afterRenderEffect({ write: () => (paper ??= new Paper(this.paper().nativeElement)).draw(this.drawing()) });
+    afterRenderEffect({
+      write: () => {
+        // After every drawing too: it begins with nothing marked.
+        this.drawing();
+        paper?.select(this.selected(), this.overlay());
+      },
+    });
   }
 
   protected choose(event: MouseEvent): void {

@@ -1,55 +1,64 @@
-/** The formed deck: true faces with the sheet's thickness, mold points, every leg dimensioned, the selected bend noted. */
+/** The formed deck: true faces with the sheet's thickness, mold points, every leg dimensioned, every bend named. */
 import type { Solved } from '@shared/result';
+import { apex, bendName } from './bend-name';
 import type { Box } from './box';
 import { boxAround } from './box';
-import { Clearance } from './clearance';
+import { Clearance, type Footprint } from './clearance';
 import type { Curve, Frames } from './formed-frames';
-import { formedFrames, onCurve } from './formed-frames';
+import { formedFrames } from './formed-frames';
 import { bendPath, facePoints, outlinePath, outlineSegments, stretchPath } from './formed-outline';
-import { leaderNote } from './leader';
+import { type LeaderNote, leaderNote, runsInto } from './leader';
 import { legDimensions } from './leg-dimensions';
-import type { Drawing, Mark, TextMark } from './marks';
-import { textBox } from './marks';
-import type { Point } from './point';
-import { along, direction } from './point';
+import type { Drawing, Mark, Overlay, TextMark } from './marks';
+import { NO_OVERLAY, textBox } from './marks';
 import type { View } from './view';
 import { fitView } from './view';
 
 export interface FormedOptions {
   readonly width: number;
   readonly height: number;
-  /** Entry of the chain. */
-  readonly selected: number | null;
   readonly figureOf: (length: number) => string;
-  /** "L2 · face B up · 90°" and "BA 0.273 · SB 0.196". */
-  readonly noteOf: (bend: number) => readonly [string, string];
+  /** What is said of a bend when it is selected, the fullest way first. */
+  readonly notesOf: (bend: number) => readonly LeaderNote[];
 }
 
 export interface FormedDrawing extends Drawing {
   /** Dimensions that found no room; the ledger has them. */
   readonly left: number;
+  /** The note of a selected bend; nothing for an entry that has none. Laid out when it is asked for. */
+  readonly noteOn: (chain: number | null) => Overlay;
 }
 
 /** Null when the part can't be drawn; the findings say why. */
 export function formedDrawing(solved: Solved, options: FormedOptions): FormedDrawing | null {
   const frames = formedFrames(solved);
   if (!frames || options.width < 40 || options.height < 40) return null;
-  const { width, height, selected } = options;
+  const { width, height } = options;
   const view = viewOf(solved, frames, width, height);
   const paper: Box = { left: 6, top: 6, right: width - 6, bottom: height - 6 };
-  const clearance = new Clearance(paper, outlineSegments(frames, view));
+  const outline = outlineSegments(frames, view);
+  const clearance = new Clearance(paper, outline);
 
-  const metal = metalMarks(frames, view, selected);
+  const metal = metalMarks(frames, view);
   const molds = moldMarks(solved, view, clearance);
-  const dimensions = legDimensions(solved, frames, view, clearance, options.figureOf, selected);
-  const curve = frames.curves.find((one) => one.chain === selected);
-  const leader = curve ? leaderOf(curve, view, options, clearance) : [];
-  const names = frames.curves.flatMap((one) => (one === curve ? [] : nameOf(one, view, clearance)));
+  const dimensions = legDimensions(solved, frames, view, clearance, options.figureOf);
+  // Names are known apart from the rest: they alone give way to the note of a bend where it has no other room.
+  const taken = new Clearance(paper);
+  const names = frames.curves.flatMap((curve) => {
+    const mark = bendName(curve, view, (footprint) => clearance.cost(footprint) + taken.cost(footprint));
+    if (!mark) return [];
+    taken.add(alone(mark));
+    return [{ curve, mark }];
+  });
   return {
     width,
     height,
-    marks: [...metal, ...molds, ...dimensions.marks, ...names, ...leader],
+    marks: [...metal, ...molds, ...dimensions.marks, ...names.map(({ mark }) => mark)],
     left: dimensions.left,
+    noteOn: (chain) => {
+      const curve = chain === null ? undefined : frames.curves.find((one) => one.chain === chain);
+      return curve ? noteOn(curve, names, view, options, clearance, new Clearance(paper)) : NO_OVERLAY;
+    },
   };
 }
 
@@ -63,24 +72,16 @@ function viewOf(solved: Solved, frames: Frames, width: number, height: number): 
   return fitView([...facePoints(frames, 'lower'), ...facePoints(frames, 'upper')], level, room);
 }
 
-function metalMarks(frames: Frames, view: View, selected: number | null): Mark[] {
-  const sheet: Mark = { kind: 'path', role: 'sheet', d: outlinePath(frames, view) };
-  const bends = frames.curves.map((curve): Mark => {
-    const common = { pick: curve.chain, selected: curve.chain === selected };
-    return { kind: 'path', role: 'bend', d: bendPath(curve, view), ...common };
-  });
-  const picked = frames.stretches.flatMap((stretch, index): Mark[] =>
-    stretch.chain === selected
-      ? [{ kind: 'path', role: 'leg', d: stretchPath(frames, index, view), pick: stretch.chain, selected: true }]
-      : [],
-  );
-  const hits = frames.stretches.map((stretch, index): Mark => {
-    return { kind: 'path', role: 'hit', d: stretchPath(frames, index, view), pick: stretch.chain };
-  });
-  const bendHits = frames.curves.map((curve): Mark => {
-    return { kind: 'path', role: 'hit', d: bendPath(curve, view), pick: curve.chain };
-  });
-  return [sheet, ...bends, ...picked, ...hits, ...bendHits];
+/** Bends and legs are seen when they are selected; the hits over them are what a pointer finds. */
+function metalMarks(frames: Frames, view: View): Mark[] {
+  const bends = frames.curves.map((curve) => ({ d: bendPath(curve, view), pick: curve.chain }));
+  const legs = frames.stretches.map((stretch) => ({ d: stretchPath(stretch, view), pick: stretch.chain }));
+  return [
+    { kind: 'path', role: 'sheet', d: outlinePath(frames, view) },
+    ...bends.map((one): Mark => ({ kind: 'path', role: 'bend', ...one })),
+    ...legs.map((one): Mark => ({ kind: 'path', role: 'leg', ...one })),
+    ...[...legs, ...bends].map((one): Mark => ({ kind: 'path', role: 'hit', ...one })),
+  ];
 }
 
 const CROSS = 5;
@@ -92,43 +93,35 @@ function moldMarks(solved: Solved, view: View, clearance: Clearance): Mark[] {
   return crosses.length === 0 ? [] : [{ kind: 'path', role: 'mold', d: crosses.join('') }];
 }
 
-/** The middle of a bend's outer face and the way out from there. */
-function apex(curve: Curve, view: View): { tip: Point; outward: Point } {
-  const outer = curve.lowerRadius > curve.upperRadius ? 'lower' : 'upper';
-  const tip = view.place(onCurve(curve, outer, 0.5));
-  const inner = view.place(onCurve(curve, outer === 'lower' ? 'upper' : 'lower', 0.5));
-  return { tip, outward: direction(inner, tip) };
+const alone = (mark: TextMark): Footprint => ({ texts: [textBox(mark)], lines: [], thin: [] });
+
+interface Named {
+  readonly curve: Curve;
+  readonly mark: TextMark;
 }
 
-function leaderOf(curve: Curve, view: View, options: FormedOptions, clearance: Clearance): readonly Mark[] {
+/** Where it covers no name but its own if that can be, else over a name or two, which are not shown meanwhile. */
+function noteOn(
+  curve: Curve,
+  names: readonly Named[],
+  view: View,
+  options: FormedOptions,
+  clearance: Clearance,
+  taken: Clearance,
+): Overlay {
   const { tip, outward } = apex(curve, view);
-  const [upper, lower] = options.noteOf(curve.bend);
-  return leaderNote(tip, outward, upper, lower, curve.chain, clearance);
-}
-
-/** "L2" inside the bend or outside it, where there is room. */
-function nameOf(curve: Curve, view: View, clearance: Clearance): Mark[] {
-  const { tip, outward } = apex(curve, view);
-  const inner = { x: -outward.x, y: -outward.y };
-  const depth = Math.min(curve.lowerRadius, curve.upperRadius) * view.scale;
-  const places = [
-    along(tip, inner, Math.abs(curve.lowerRadius - curve.upperRadius) * view.scale + Math.min(depth, 14) + 12),
-    along(tip, outward, 22),
-    along(tip, inner, 40),
-  ];
-  for (const place of places) {
-    const mark: TextMark = {
-      kind: 'text',
-      role: 'name',
-      text: `L${curve.bend + 1}`,
-      at: place,
-      anchor: 'middle',
-      pick: curve.chain,
-    };
-    const footprint = { texts: [textBox(mark)], lines: [], thin: [] };
-    if (clearance.cost(footprint) > 0) continue;
-    clearance.add(footprint);
-    return [mark];
+  const own = names.filter((name) => name.curve === curve).map(({ mark }) => mark);
+  const others = names.filter((name) => name.curve !== curve).map(({ mark }) => mark);
+  for (const mark of others) taken.add(alone(mark));
+  const overNames = (footprint: Footprint): number => clearance.cost(footprint);
+  const besideNames = (footprint: Footprint): number => clearance.cost(footprint) + taken.cost(footprint);
+  for (const cost of [besideNames, overNames]) {
+    for (const note of options.notesOf(curve.bend)) {
+      const plan = leaderNote(tip, outward, note, curve.chain, cost);
+      if (!plan) continue;
+      const covered = others.filter((mark) => runsInto(plan.footprint, textBox(mark)));
+      return { marks: plan.marks, hides: [...own, ...covered] };
+    }
   }
-  return [];
+  return NO_OVERLAY;
 }

@@ -1,5 +1,5 @@
 import type { PartDocument } from '@shared/part/document';
-import { faceOf, formedFrames, onCurve } from './formed-frames';
+import { formedFrames, onCurve } from './formed-frames';
 import { samplePart, solved } from './sample-parts';
 
 const joggled: PartDocument = {
@@ -31,7 +31,7 @@ describe('the frames of the formed part', () => {
         const lines = result.formed!.faces![face].flatMap((element) => ('line' in element ? [element.line] : []));
         expect(lines.length).toBe(frames.stretches.length);
         lines.forEach(([from, to], index) => {
-          const [start, end] = faceOf(frames.stretches[index]!, face, frames.thickness);
+          const [start, end] = frames.stretches[index]![face];
           for (const [drawn, [x, y]] of [
             [start, from],
             [end, to],
@@ -48,8 +48,8 @@ describe('the frames of the formed part', () => {
     const frames = formedFrames(solved(samplePart('tray', 4)))!;
     frames.curves.forEach((curve, index) => {
       for (const face of ['upper', 'lower'] as const) {
-        const before = faceOf(frames.stretches[index]!, face, frames.thickness)[1];
-        const after = faceOf(frames.stretches[index + 1]!, face, frames.thickness)[0];
+        const before = frames.stretches[index]![face][1];
+        const after = frames.stretches[index + 1]![face][0];
         expect(onCurve(curve, face, 0).x).toBeCloseTo(before.x, 9);
         expect(onCurve(curve, face, 0).y).toBeCloseTo(before.y, 9);
         expect(onCurve(curve, face, 1).x).toBeCloseTo(after.x, 9);

@@ -1,98 +1,70 @@
 /** Where each leg and bend of the formed part lies, so that dimensions and leaders have something to point at. */
-import type { Solved } from '@shared/result';
+import { sides } from '@shared/formed/faces';
+import type { Bar, Sector } from '@shared/formed/solid';
+import { solidsOf } from '@shared/formed/solids-of';
+import type { Arc } from '@shared/geometry/curve';
+import { arcPoint, ends } from '@shared/geometry/curve';
+import type { Solved, XY } from '@shared/result';
 import type { Point } from './point';
+
+export type Face = 'lower' | 'upper';
 
 export interface Stretch {
   /** Index in `legs`; null for the straight inside a joggle. */
   readonly leg: number | null;
   readonly chain: number;
-  /** Lower face, at the start and the end. */
-  readonly start: Point;
-  readonly end: Point;
-  /** Radians from +x. */
+  /** Degrees from +x. */
   readonly heading: number;
+  readonly lower: readonly [Point, Point];
+  readonly upper: readonly [Point, Point];
 }
 
 export interface Curve {
   /** Index in `bends`. */
   readonly bend: number;
   readonly chain: number;
-  readonly centre: Point;
-  readonly lowerRadius: number;
-  readonly upperRadius: number;
+  readonly lower: Arc;
+  readonly upper: Arc;
   /** 1 up (counter-clockwise), −1 down. */
   readonly sense: 1 | -1;
-  readonly from: number;
-  readonly sweep: number;
 }
 
 export interface Frames {
-  readonly thickness: number;
   /** Alternating: one stretch more than curves. */
   readonly stretches: readonly Stretch[];
   readonly curves: readonly Curve[];
 }
 
-export const normal = (heading: number): Point => ({ x: -Math.sin(heading), y: Math.cos(heading) });
-export const forward = (heading: number): Point => ({ x: Math.cos(heading), y: Math.sin(heading) });
-
-const moved = (from: Point, by: Point, length: number): Point => ({
-  x: from.x + by.x * length,
-  y: from.y + by.y * length,
-});
+const toPoint = ([x, y]: XY): Point => ({ x, y });
 
 /** Null when a figure it stands on is missing, as after a consumed leg. */
 export function formedFrames(solved: Solved): Frames | null {
-  if (!solved.formed?.faces) return null;
-  const T = solved.thickness;
+  const solids = solidsOf(solved);
+  if (!solids) return null;
   const stretches: Stretch[] = [];
   const curves: Curve[] = [];
-  let place: Point = { x: 0, y: 0 };
-  let heading = 0;
-  let next = 0;
-
-  const straight = (leg: number | null, chain: number, length: number): void => {
-    const end = moved(place, forward(heading), length);
-    stretches.push({ leg, chain, start: place, end, heading });
-    place = end;
-  };
-  const turn = (): void => {
-    const bend = solved.bends[next];
-    if (!bend) return;
-    const sense = bend.turn === 'up' ? 1 : -1;
-    const lowerRadius = sense === 1 ? bend.radius + T : bend.radius;
-    const upperRadius = sense === 1 ? bend.radius : bend.radius + T;
-    const centre = moved(place, normal(heading), sense * lowerRadius);
-    const sweep = (bend.angle * Math.PI) / 180;
-    curves.push({ bend: next, chain: bend.chain, centre, lowerRadius, upperRadius, sense, from: heading, sweep });
-    heading += sense * sweep;
-    place = moved(centre, normal(heading), -sense * lowerRadius);
-    next += 1;
-  };
-
-  for (const [index, leg] of solved.legs.entries()) {
-    straight(index, leg.chain, leg.flat);
-    const bend = solved.bends[next];
-    if (!bend) continue;
-    turn();
-    if (bend.joggle === null) continue;
-    const joggle = solved.joggles[bend.joggle];
-    if (!joggle || joggle.straight === null) return null;
-    straight(null, joggle.chain, joggle.straight);
-    turn();
+  for (const solid of solids) {
+    if (solid.kind === 'bar') stretches.push(stretchOf(solid, solved.thickness));
+    else curves.push(curveOf(solid, solved.thickness));
   }
-  return { thickness: T, stretches, curves };
+  return { stretches, curves };
+}
+
+function stretchOf(bar: Bar, thickness: number): Stretch {
+  const [upper, lower] = sides(bar, thickness).map((side): readonly [Point, Point] => {
+    const [start, end] = ends(side);
+    return [toPoint(start), toPoint(end)];
+  }) as [Stretch['upper'], Stretch['lower']];
+  return { leg: bar.leg, chain: bar.chain, heading: bar.heading, lower, upper };
+}
+
+function curveOf(sector: Sector, thickness: number): Curve {
+  const [upper, lower] = sides(sector, thickness) as readonly [Arc, Arc];
+  return { bend: sector.bend, chain: sector.chain, lower, upper, sense: sector.sweep > 0 ? 1 : -1 };
 }
 
 /** A point of a curve: on its lower or upper face, at a part (0 to 1) of its sweep. */
-export function onCurve(curve: Curve, face: 'lower' | 'upper', part: number): Point {
-  const radius = face === 'lower' ? curve.lowerRadius : curve.upperRadius;
-  return moved(curve.centre, normal(curve.from + curve.sense * curve.sweep * part), -curve.sense * radius);
-}
-
-/** The upper or lower face of a stretch. */
-export function faceOf(stretch: Stretch, face: 'lower' | 'upper', thickness: number): [Point, Point] {
-  if (face === 'lower') return [stretch.start, stretch.end];
-  const up = normal(stretch.heading);
-  return [moved(stretch.start, up, thickness), moved(stretch.end, up, thickness)];
+export function onCurve(curve: Curve, face: Face, part: number): Point {
+  const arc = curve[face];
+  return toPoint(arcPoint(arc, arc.from + arc.sweep * part));
 }

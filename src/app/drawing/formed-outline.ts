@@ -1,12 +1,12 @@
 /** The metal itself: outline of the formed part and of each bend, as SVG paths, and as segments to keep clear of. */
-import type { Curve, Frames } from './formed-frames';
-import { faceOf, onCurve } from './formed-frames';
+import type { Curve, Face, Frames } from './formed-frames';
+import { onCurve } from './formed-frames';
 import { at } from './marks';
 import type { Point, Segment } from './point';
 import type { View } from './view';
 
-function arcTo(curve: Curve, face: 'lower' | 'upper', backwards: boolean, view: View): string {
-  const radius = (face === 'lower' ? curve.lowerRadius : curve.upperRadius) * view.scale;
+function arcTo(curve: Curve, face: Face, backwards: boolean, view: View): string {
+  const radius = curve[face].radius * view.scale;
   const to = at(view.place(onCurve(curve, face, backwards ? 0 : 1)));
   if (radius < 0.01) return `L${to}`;
   // A counter-clockwise turn of the model stays one on the paper: sweep flag 0.
@@ -15,11 +15,9 @@ function arcTo(curve: Curve, face: 'lower' | 'upper', backwards: boolean, view: 
 }
 
 /** Closed outline of the whole part: out along the lower face, back along the upper one. */
-export function outlinePath(frames: Frames, view: View): string {
-  const { stretches, curves, thickness } = frames;
+export function outlinePath({ stretches, curves }: Frames, view: View): string {
   const out: string[] = [];
-  stretches.forEach((stretch, index) => {
-    const [start, end] = faceOf(stretch, 'lower', thickness);
+  stretches.forEach(({ lower: [start, end] }, index) => {
     out.push(`${index === 0 ? 'M' : 'L'}${at(view.place(start))}L${at(view.place(end))}`);
     const curve = curves[index];
     if (curve) out.push(arcTo(curve, 'lower', false, view));
@@ -27,7 +25,7 @@ export function outlinePath(frames: Frames, view: View): string {
   for (let index = stretches.length - 1; index >= 0; index--) {
     const stretch = stretches[index];
     if (!stretch) continue;
-    const [start, end] = faceOf(stretch, 'upper', thickness);
+    const [start, end] = stretch.upper;
     out.push(`L${at(view.place(end))}L${at(view.place(start))}`);
     const curve = curves[index - 1];
     if (curve) out.push(arcTo(curve, 'upper', true, view));
@@ -43,22 +41,18 @@ export function bendPath(curve: Curve, view: View): string {
 }
 
 /** Closed outline of one stretch. */
-export function stretchPath(frames: Frames, index: number, view: View): string {
-  const stretch = frames.stretches[index];
-  if (!stretch) return '';
-  const [a, b] = faceOf(stretch, 'lower', frames.thickness);
-  const [d, c] = faceOf(stretch, 'upper', frames.thickness);
+export function stretchPath({ lower: [a, b], upper: [d, c] }: Frames['stretches'][number], view: View): string {
   return `M${[a, b, c, d].map((point) => at(view.place(point))).join('L')}Z`;
 }
 
 const STEPS = 6;
 
 /** Points of one face, in order; arcs by a few chords, enough to keep texts off them and to fit the view. */
-export function facePoints(frames: Frames, face: 'lower' | 'upper'): Point[] {
-  return frames.stretches.flatMap((stretch, index) => {
-    const curve = frames.curves[index];
+export function facePoints({ stretches, curves }: Frames, face: Face): Point[] {
+  return stretches.flatMap((stretch, index) => {
+    const curve = curves[index];
     const arc = curve ? Array.from({ length: STEPS + 1 }, (_, step) => onCurve(curve, face, step / STEPS)) : [];
-    return [...faceOf(stretch, face, frames.thickness), ...arc];
+    return [...stretch[face], ...arc];
   });
 }
 

@@ -1,15 +1,15 @@
 /** Every leg dimensioned as it is measured, each where it clashes with nothing. */
-import type { Solved } from '@shared/result';
+import { direction as headingOf } from '@shared/geometry/direction';
+import type { LegResult, Solved } from '@shared/result';
 import type { Clearance } from './clearance';
 import { CLASH } from './clearance';
 import type { DimensionPlan, FigurePlace } from './dimension';
 import { planDimension } from './dimension';
-import type { Frames, Stretch } from './formed-frames';
-import { forward, normal } from './formed-frames';
+import type { Face, Frames, Stretch } from './formed-frames';
 import { facePoints } from './formed-outline';
 import type { Mark } from './marks';
 import type { Point } from './point';
-import { direction } from './point';
+import { along, direction } from './point';
 import type { View } from './view';
 
 const OFFSETS = [28, 46, 64, 86, 110, 138];
@@ -30,56 +30,49 @@ export function legDimensions(
   view: View,
   clearance: Clearance,
   figureOf: (length: number) => string,
-  selected: number | null,
 ): LegDimensions {
   const marks: Mark[] = [];
   let left = 0;
   // The long ones first: they have the fewest places to go.
   const order = frames.stretches
-    .filter((stretch) => stretch.leg !== null)
-    .sort((a, b) => lengthOf(solved, b) - lengthOf(solved, a));
-  for (const stretch of order) {
-    const plan = bestPlan(solved, frames, stretch, view, clearance, figureOf, selected);
+    .flatMap((stretch, index) => {
+      const leg = stretch.leg === null ? undefined : solved.legs[stretch.leg];
+      return leg ? [{ leg, stretch, outer: outerFace(frames, index) }] : [];
+    })
+    .sort((a, b) => b.leg.dimension - a.leg.dimension);
+  for (const { leg, stretch, outer } of order) {
+    const plan = bestPlan(leg, stretch, outer, frames, view, clearance, figureOf(leg.dimension));
     if (!plan) left += 1;
     else {
-      marks.push(...plan.marks);
+      marks.push(...plan.marks());
       clearance.add(plan.footprint);
     }
   }
   return { marks, left };
 }
 
-const lengthOf = (solved: Solved, stretch: Stretch): number =>
-  stretch.leg === null ? 0 : (solved.legs[stretch.leg]?.dimension ?? 0);
-
 function bestPlan(
-  solved: Solved,
-  frames: Frames,
+  leg: LegResult,
   stretch: Stretch,
+  outer: Face,
+  frames: Frames,
   view: View,
   clearance: Clearance,
-  figureOf: (length: number) => string,
-  selected: number | null,
+  text: string,
 ): DimensionPlan | null {
-  const leg = stretch.leg === null ? undefined : solved.legs[stretch.leg];
-  if (!leg) return null;
-  const index = frames.stretches.indexOf(stretch);
-  const ends = [measuredEnd(frames, index, 'start', leg.setback[0]), measuredEnd(frames, index, 'end', leg.setback[1])];
-  const [from, to] = ends as [Point, Point];
-  const text = figureOf(leg.dimension);
-  const common = { pick: leg.chain, selected: leg.chain === selected };
-  const outer = outerSide(frames, index);
+  const common = { pick: leg.chain };
   let best: DimensionPlan | null = null;
   let least = CLASH;
-  for (const side of [1, -1] as const) {
-    const [a, b] = [onSide(frames, stretch, from, side), onSide(frames, stretch, to, side)];
-    const outward = direction(view.place(onSide(frames, stretch, from, -side as 1 | -1)), view.place(a));
-    const beyond = frames.stretches.length > FEW_LEGS ? [] : outsideOffsets(frames, view, view.place(a), outward);
+  for (const face of ['upper', 'lower'] as const) {
+    const [a, b] = measured(stretch, face, leg.setback).map(view.place) as [Point, Point];
+    const [across] = measured(stretch, face === 'upper' ? 'lower' : 'upper', leg.setback);
+    const outward = direction(view.place(across), a);
+    const beyond = frames.stretches.length > FEW_LEGS ? [] : outsideOffsets(frames, view, a, outward);
     [...OFFSETS, ...beyond].forEach((offset, level) => {
       for (const [rank, figure] of FIGURES.entries()) {
-        const base = level * 10 + (side === outer ? 0 : 14) + rank * 2;
+        const base = level * 10 + (face === outer ? 0 : 14) + rank * 2;
         if (base >= least) continue;
-        const plan = planDimension(view.place(a), view.place(b), outward, offset, text, figure, common);
+        const plan = planDimension(a, b, outward, offset, text, figure, common);
         if (!plan) continue;
         const cost = base + clearance.cost(plan.footprint);
         if (cost >= least) continue;
@@ -103,25 +96,16 @@ function outsideOffsets(frames: Frames, view: View, foot: Point, outward: Point)
   return past < 10 ? [] : OUTSIDE.map((more) => past + more);
 }
 
-/** Where the dimension ends, on the lower face extended: the tangent line, and beyond it by the setback. */
-function measuredEnd(frames: Frames, index: number, end: 'start' | 'end', setback: number): Point {
-  const stretch = frames.stretches[index];
-  if (!stretch) return { x: 0, y: 0 };
-  const way = forward(stretch.heading);
-  const [foot, by] = end === 'start' ? [stretch.start, -setback] : [stretch.end, setback];
-  return { x: foot.x + way.x * by, y: foot.y + way.y * by };
+/** Where the dimension begins and ends, on a face extended: the tangent line, and beyond it by the setback. */
+function measured(stretch: Stretch, face: Face, [before, after]: readonly [number, number]): [Point, Point] {
+  const [start, end] = stretch[face];
+  const way = headingOf(stretch.heading);
+  return [along(start, way, -before), along(end, way, after)];
 }
 
-/** The same place on the upper (1) or lower (−1) face. */
-function onSide(frames: Frames, stretch: Stretch, lower: Point, side: 1 | -1): Point {
-  if (side === -1) return lower;
-  const up = normal(stretch.heading);
-  return { x: lower.x + up.x * frames.thickness, y: lower.y + up.y * frames.thickness };
-}
-
-/** The side away from the rest of the part. */
-function outerSide(frames: Frames, index: number): 1 | -1 {
+/** The face away from the rest of the part. */
+function outerFace(frames: Frames, index: number): Face {
   const before = frames.curves[index - 1]?.sense ?? 0;
   const after = frames.curves[index]?.sense ?? 0;
-  return before + after < 0 ? 1 : -1;
+  return before + after < 0 ? 'upper' : 'lower';
 }

@@ -22,9 +22,8 @@ export type LineRole =
 export type TextRole = 'figure' | 'station' | 'end-station' | 'note' | 'note-strong' | 'label' | 'name';
 
 export interface Common {
-  /** Entry of the chain that this mark belongs to and that a click on it selects. */
+  /** Entry of the chain that this mark belongs to: a click on it selects the entry, and it is marked with the entry. */
   readonly pick?: number;
-  readonly selected?: boolean;
 }
 export type PathMark = Common & { readonly kind: 'path'; readonly role: LineRole; readonly d: string };
 export type TextMark = Common & {
@@ -42,6 +41,14 @@ export interface Drawing {
   readonly height: number;
   readonly marks: readonly Mark[];
 }
+
+/** What is laid over a drawing for the entry that is selected, and which of its marks give way to that. */
+export interface Overlay {
+  readonly marks: readonly Mark[];
+  readonly hides: readonly Mark[];
+}
+
+export const NO_OVERLAY: Overlay = { marks: [], hides: [] };
 
 export const TEXT_SIZE: Readonly<Record<TextRole, number>> = {
   figure: 12.5,
@@ -62,7 +69,15 @@ export function textWidth(text: string, role: TextRole): number {
   return ems * TEXT_SIZE[role] * (BOLD.has(role) ? 1.05 : 1);
 }
 
+const known = new Map<string, number>();
+
 function emsOf(letter: string): number {
+  const ems = known.get(letter) ?? measureLetter(letter);
+  known.set(letter, ems);
+  return ems;
+}
+
+function measureLetter(letter: string): number {
   if (/[0-9]/.test(letter)) return 0.6;
   if (/[ .,:;·'|ijl]/.test(letter)) return 0.31;
   if (/[mwMW—]/.test(letter)) return 0.92;

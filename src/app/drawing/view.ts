@@ -1,3 +1,4 @@
+import { direction } from '@shared/geometry/direction';
 import type { Box } from './box';
 import type { Point } from './point';
 
@@ -7,14 +8,9 @@ export interface View {
   readonly place: (model: Point) => Point;
 }
 
-/**
- * Turns the model so that the heading `level` (radians) lies along +x, and fits it into the room, centred.
- *
- * @param largest most pixels a unit of the model may take, so that a small part is not blown up out of all measure
- */
-export function fitView(model: readonly Point[], level: number, room: Box, largest = Infinity): View {
-  const cos = Math.cos(level);
-  const sin = Math.sin(level);
+/** Turns the model so that the heading `level` (degrees) lies along +x, and fits it into the room, centred. */
+export function fitView(model: readonly Point[], level: number, room: Box): View {
+  const { x: cos, y: sin } = direction(level);
   const turned = ({ x, y }: Point): Point => ({ x: x * cos + y * sin, y: y * cos - x * sin });
   const points = model.map(turned);
   const xs = points.map((p) => p.x);
@@ -22,7 +18,7 @@ export function fitView(model: readonly Point[], level: number, room: Box, large
   const [left, right, bottom, top] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)];
   const width = Math.max(right - left, 1e-9);
   const height = Math.max(top - bottom, 1e-9);
-  const scale = Math.min((room.right - room.left) / width, (room.bottom - room.top) / height, largest);
+  const scale = Math.min((room.right - room.left) / width, (room.bottom - room.top) / height);
   const centreX = (room.left + room.right) / 2;
   const centreY = (room.top + room.bottom) / 2;
   return {

@@ -2,7 +2,7 @@
 export const ALLOWANCE_CHOICES = [
   {
     method: 'handbook',
-    name: 'Handbook rule',
+    name: 'Handbook',
     says: 'The rule of the airframe mechanics handbook: 0.01743 R + 0.0078 T a degree.',
   },
   {
@@ -13,7 +13,7 @@ export const ALLOWANCE_CHOICES = [
   { method: 'din-6935', name: 'DIN 6935', says: 'K follows from radius and thickness, as the standard has it.' },
   {
     method: 'rule-90',
-    name: 'Rule for 90° bends',
+    name: '90° rule',
     says: 'Shop rule by the hardness of the metal, scaled to other angles.',
   },
 ] as const;

@@ -80,7 +80,7 @@ function typed(
   const parsed = parseTypedChain(values.chain);
   if (parsed.ok) return [...parsed.chain];
   chainErrors.push(...parsed.errors);
-  messages['chain'] = parsed.errors[0]?.message ?? 'This chain can not be read.';
+  messages['chain'] = parsed.errors[0]?.message ?? "This chain can't be read.";
   return null;
 }
 
@@ -97,7 +97,7 @@ function started(values: NewPartValues, messages: Record<string, string>): Chain
   }
   const radius = evaluate(values.radius, 'length', context);
   if (!radius.ok) messages['radius'] = radius.message;
-  else if (radius.value < 0) messages['radius'] = 'The bend radius can not be less than zero.';
+  else if (radius.value < 0) messages['radius'] = "The bend radius can't be less than zero.";
   return [...section.make(sizes, values.radius)];
 }
 

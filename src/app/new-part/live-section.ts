@@ -37,7 +37,7 @@ export class LiveSection {
       { label: 'Blank length', value: say(blank.length), unit: blank.length === null ? '' : unit },
       { label: 'Bends', value: String(bends.length), unit: '' },
       {
-        label: 'Formed, width × height',
+        label: 'Envelope, width × height',
         value: envelope ? `${say(envelope.width)} × ${say(envelope.height)}` : '—',
         unit: envelope ? unit : '',
       },

@@ -57,7 +57,7 @@ interface Schema {
 function accepts(schema: Schema): ValidatorFn {
   return (control) => {
     const parsed = schema.safeParse(control.value);
-    return parsed.success ? null : { words: parsed.error.issues[0]?.message ?? 'This can not be used.' };
+    return parsed.success ? null : { words: parsed.error.issues[0]?.message ?? "This can't be used." };
   };
 }
 

@@ -8,9 +8,11 @@ import { MatButtonToggleHarness } from '@angular/material/button-toggle/testing'
 import { MatFormFieldHarness } from '@angular/material/form-field/testing';
 import { MatInputHarness } from '@angular/material/input/testing';
 import { provideRouter, Router } from '@angular/router';
+import type { CreatePart, Part } from '@shared/contracts/parts';
 import type { Role } from '@shared/contracts/session';
 import { PROBLEM } from '@shared/contracts/problem-types';
 import { problems } from '../server/problems';
+import { sampleList, sampleRow } from '../parts/sample-rows';
 import { SessionStore } from '../session/session-store';
 import { NewPartPage } from './new-part-page';
 
@@ -28,7 +30,10 @@ describe('NewPartPage', () => {
         provideHttpClient(withInterceptors([problems])),
         provideHttpClientTesting(),
         provideRouter([{ path: 'parts/:id', children: [] }]),
-        { provide: SessionStore, useValue: { hasRole: (role: Role) => roles.includes(role) } },
+        {
+          provide: SessionStore,
+          useValue: { hasRole: (role: Role) => roles.includes(role), person: () => ({ name: 'Avery Example' }) },
+        },
       ],
     });
     backend = TestBed.inject(HttpTestingController);
@@ -123,15 +128,83 @@ describe('NewPartPage', () => {
     expect(await (await field('Part number')).hasErrors()).toBeFalse();
   });
 
-  it('loses nothing when the server is lost', async () => {
+  it('loses nothing when the server is lost, and claims nothing about the part', async () => {
     await open();
     await type('Part number', 'LW-9');
     await type('Title', 'Channel');
     await make();
     backend.expectOne('/api/parts').error(new ProgressEvent('error'));
     await settle();
-    expect(element().textContent).toContain('The part is not made yet');
+    expect(element().textContent).toContain('may have been made');
+    expect(element().textContent).not.toContain('not made');
     expect(await valueOf('Part number')).toBe('LW-9');
+  });
+
+  describe('after an answer that was lost', () => {
+    let sent: CreatePart;
+
+    beforeEach(async () => {
+      await open();
+      await type('Part number', 'lw-9');
+      await type('Title', 'Channel');
+      await make();
+      const request = backend.expectOne('/api/parts');
+      sent = request.request.body as CreatePart;
+      request.error(new ProgressEvent('error'));
+      await settle();
+    });
+
+    const refuse = async (): Promise<void> => {
+      await make();
+      backend
+        .expectOne({ method: 'POST', url: '/api/parts' })
+        .flush(
+          { type: PROBLEM.taken, title: 'Taken', status: 409, errors: [{ path: 'number', message: 'Taken.' }] },
+          { status: 409, statusText: '' },
+        );
+      await settle();
+    };
+    const found = async (change: Partial<Part>): Promise<void> => {
+      backend
+        .expectOne((request) => request.method === 'GET' && request.params.get('search') === 'lw-9')
+        .flush(sampleList([sampleRow('19', { number: 'LW-9-1' }), sampleRow('9', { number: 'lw-9' })]));
+      await settle();
+      const { document, number, title } = sent;
+      const swapped = Object.fromEntries(Object.entries(document as object).reverse());
+      backend
+        .expectOne('/api/parts/9')
+        .flush({ id: '9', number, title, createdBy: 'Avery Example', revision: { document: swapped }, ...change });
+      await settle();
+    };
+
+    it('goes to the part that the first try has made', async () => {
+      await refuse();
+      await found({});
+      expect(TestBed.inject(Router).url).toBe('/parts/9');
+      expect(sessionStorage.getItem('lw-new-part')).toBeNull();
+    });
+
+    it('says where the part is when something else was typed since', async () => {
+      await type('Overall width', '3');
+      await refuse();
+      await found({});
+      expect(element().textContent).toContain('was made by the try whose answer was lost');
+      expect(element().querySelector('.trouble a')?.getAttribute('href')).toBe('/parts/9');
+    });
+
+    it('leaves the part of somebody else alone', async () => {
+      await refuse();
+      await found({ createdBy: 'Wenna Other' });
+      expect(element().querySelector('.trouble')?.textContent).toContain('Taken.');
+      expect(await (await field('Part number')).getTextErrors()).toEqual(['Taken.']);
+    });
+
+    it('makes the part when the first try has not', async () => {
+      await make();
+      backend.expectOne({ method: 'POST', url: '/api/parts' }).flush({ id: 'part-9' });
+      await settle();
+      expect(TestBed.inject(Router).url).toBe('/parts/part-9');
+    });
   });
 
   it('points at the word of a typed chain', async () => {

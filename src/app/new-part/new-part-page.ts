@@ -13,6 +13,8 @@ import { ReactiveFormsModule } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { Router, RouterLink } from '@angular/router';
+import type { CreatePart, Part } from '@shared/contracts/parts';
+import { sameDocument } from '@shared/part/same-document';
 import { STARTING_SECTIONS } from '@shared/part/starting-sections';
 import type { Solved } from '@shared/result';
 import { firstValueFrom, map, startWith } from 'rxjs';
@@ -26,6 +28,7 @@ import { DocumentField } from './document-field';
 import { draftFrom, type Messages } from './draft-document';
 import { KeptDraft } from './kept-draft';
 import { LiveSection } from './live-section';
+import { partMadeBy, sameNumber } from './made-part';
 import { newPartForm } from './new-part-form';
 import type { DocumentFile } from './read-document-file';
 import { SectionChoice } from './section-choice';
@@ -63,6 +66,10 @@ export class NewPartPage {
   protected readonly file = signal<DocumentFile | null>(null);
   protected readonly busy = signal(false);
   protected readonly trouble = signal<string | null>(null);
+  /** The part that an earlier try has made, with something else than what is typed now. */
+  protected readonly made = signal<Part | null>(null);
+  /** What was sent without an answer. */
+  private unanswered: CreatePart | null = null;
   /** From the server, until the field is changed. */
   private readonly refused = signal<Messages>({});
 
@@ -99,6 +106,7 @@ export class NewPartPage {
     if (this.busy()) return;
     this.form.markAllAsTouched();
     this.trouble.set(null);
+    this.made.set(null);
     const { document } = this.draft();
     if (this.form.invalid || document === null) {
       this.trouble.set(this.whyNot());
@@ -108,16 +116,36 @@ export class NewPartPage {
     this.busy.set(true);
     const { number, title } = this.form.getRawValue();
     try {
-      const part = await firstValueFrom(
-        this.server.createPart({ number: number.trim(), title: title.trim(), document }),
-      );
-      this.kept.forget();
-      await this.router.navigate(['/parts', part.id]);
+      await this.make({ number: number.trim(), title: title.trim(), document });
     } catch (error) {
       this.explain(error);
     } finally {
       this.busy.set(false);
     }
+  }
+
+  private async make(wanted: CreatePart): Promise<void> {
+    try {
+      await this.goTo(await firstValueFrom(this.server.createPart(wanted)));
+    } catch (error) {
+      if (!(error instanceof ServerProblem)) throw error;
+      const tried = sameNumber(this.unanswered, wanted);
+      if (error.kind === 'unreachable' || error.status >= 500) this.unanswered = wanted;
+      const made = tried && error.is('taken') ? await this.lookUp(wanted) : null;
+      if (made === null) throw error;
+      if (made.title === wanted.title && sameDocument(made.revision.document, wanted.document)) await this.goTo(made);
+      else this.made.set(made);
+    }
+  }
+
+  /** The number is taken: perhaps by the very try whose answer was lost. */
+  private lookUp({ number }: CreatePart): Promise<Part | null> {
+    return partMadeBy(this.server, number, this.session.person()?.name);
+  }
+
+  private async goTo(part: Part): Promise<void> {
+    this.kept.forget();
+    await this.router.navigate(['/parts', part.id]);
   }
 
   private whyNot(): string {
@@ -132,7 +160,8 @@ export class NewPartPage {
     }
     if (error.kind === 'unreachable') {
       this.trouble.set(
-        "The part is not made yet: the server can't be reached. What you typed is still here; try again.",
+        "The server can't be reached, so the part may have been made or not. What you typed is still here; try again: " +
+          'a part that was made is found then, not made twice.',
       );
       return;
     }

@@ -17,7 +17,7 @@ export async function readDocumentFile(file: File): Promise<DocumentFile> {
   try {
     text = await file.text();
   } catch {
-    return refuse('This file can not be read. Perhaps it was moved or is still open elsewhere.');
+    return refuse("This file can't be read. Perhaps it was moved or is still open elsewhere.");
   }
   let value: unknown;
   try {

@@ -1,10 +1,21 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal, untracked } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  signal,
+  untracked,
+  viewChild,
+} from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { MatProgressBarModule } from '@angular/material/progress-bar';
 import { Title } from '@angular/platform-browser';
 import { RouterLink } from '@angular/router';
 import type { Part } from '@shared/contracts/parts';
+import { UNIT_WORDS } from '@shared/part/words';
 import { firstValueFrom } from 'rxjs';
 import { Server } from '../server/server';
 import { ServerProblem } from '../server/server-problem';
@@ -20,11 +31,12 @@ import { StationsTable } from './figures/stations-table';
 import { Ledger } from './ledger/ledger';
 import { PartHeader } from './part-header';
 import { Autosave } from './saving/autosave';
+import { LeavingSaves } from './saving/leaving-saves';
+import { LeftBehind } from './saving/left-behind';
 import { SavingNotices } from './saving/saving-notices';
 import { PartSettings } from './settings/part-settings';
 import { SheetSummary } from './settings/sheet-summary';
 import { TypedChainBox } from './typed-chain/typed-chain-box';
-import { UNIT_WORDS } from './words';
 
 type PageState =
   | { readonly is: 'loading' }
@@ -52,7 +64,7 @@ type PageState =
     StationsTable,
     TypedChainBox,
   ],
-  providers: [Autosave, PartEditor],
+  providers: [Autosave, LeftBehind, PartEditor],
   templateUrl: './part-page.html',
   styleUrl: './part-page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -67,7 +79,10 @@ export class PartPage {
   private readonly server = inject(Server);
   private readonly session = inject(SessionStore);
   private readonly autosave = inject(Autosave);
+  private readonly leavingSaves = inject(LeavingSaves);
   private readonly title = inject(Title);
+
+  private readonly ledger = viewChild(Ledger);
 
   protected readonly editor = inject(PartEditor);
   protected readonly unitWords = UNIT_WORDS;
@@ -88,6 +103,9 @@ export class PartPage {
   protected async load(id: string): Promise<void> {
     this.state.set({ is: 'loading' });
     try {
+      // What an earlier visit is still sending would otherwise come as somebody else's save.
+      const leaving = this.leavingSaves.settled(id);
+      if (leaving) await leaving;
       const part = await firstValueFrom(this.server.part(id));
       if (id === this.id()) this.open(part);
     } catch (error) {
@@ -101,10 +119,11 @@ export class PartPage {
     const target = event.target instanceof HTMLElement ? event.target : null;
     // A dialog over the page has its own keys, a box with words of its own its own undo.
     if (target?.closest('[role="dialog"], [role="menu"], [data-own-undo]')) return;
-    const command = commandFor(keyOf(event), this.editor);
+    const command = commandFor(keyOf(event), this.editor, target);
     if (!command) return;
     event.preventDefault();
     command.run(this.editor);
+    if (command.goesOn) this.ledger()?.goOn();
   }
 
   protected leaving(event: BeforeUnloadEvent): void {

@@ -41,6 +41,7 @@ export function part(document: PartDocument = channel, version = 1): Part {
     id: 'p1',
     number: 'HC-1001-1',
     title: 'Channel',
+    version: 1,
     createdAt: '2026-01-05T10:00:00.000Z',
     createdBy: 'Avery Example',
     revision: revision(document, version),

@@ -1,17 +1,12 @@
 import type { Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { channel } from './sample-part';
-import { bendSentence, betweenLegs, placesOf, placeWords } from './words';
+import { bendSentence } from './words';
 
 const solved = solve(channel) as Solved;
 const figure = (length: number): string => length.toFixed(3);
 
 describe('the words of the part page', () => {
-  it('say the angle between the legs beside the bend angle', () => {
-    expect(betweenLegs(90)).toBe('90° between legs');
-    expect(betweenLegs(22.5)).toBe('157.5° between legs');
-  });
-
   it('tell a bend in a sentence', () => {
     const sentence = bendSentence(solved, 0, figure);
     expect(sentence).toContain('L1: face A up, 90° up, 90° between legs, inside radius 0.160');
@@ -23,13 +18,5 @@ describe('the words of the part page', () => {
   it('say so when the stations are not known', () => {
     const consumed = solve({ ...channel, chain: channel.chain.with(2, { leg: 0.2 }) }) as Solved;
     expect(bendSentence(consumed, 1, figure)).toContain('its stations are not known');
-  });
-
-  it('name the places of a finding as the ledger does', () => {
-    expect(placesOf('chain/1 chain/3')).toEqual([1, 3]);
-    expect(placesOf('')).toEqual([]);
-    expect(placeWords(solved, 'chain/1 chain/3')).toBe('L1, L2');
-    expect(placeWords(solved, 'chain/2')).toBe('Web');
-    expect(placeWords(solved, '')).toBe('');
   });
 });

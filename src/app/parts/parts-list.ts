@@ -51,6 +51,8 @@ export class PartsList {
 
   show(query: PartQuery): void {
     this.dropped.next();
+    // The place where the old list ended means nothing in the new one.
+    this.next.set(null);
     this.asked.update((asked) => ({ query, attempt: asked?.attempt ?? 0 }));
   }
 

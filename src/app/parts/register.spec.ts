@@ -10,6 +10,7 @@ import { MatInputHarness } from '@angular/material/input/testing';
 import { MatSelectHarness } from '@angular/material/select/testing';
 import { MatSortHarness } from '@angular/material/sort/testing';
 import { MatTableHarness } from '@angular/material/table/testing';
+import { By } from '@angular/platform-browser';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import type { Role } from '@shared/contracts/session';
@@ -17,6 +18,7 @@ import { of } from 'rxjs';
 import { problems } from '../server/problems';
 import { Reachability } from '../server/reachability';
 import { SessionStore } from '../session/session-store';
+import { PartsList } from './parts-list';
 import { Register } from './register';
 import { sampleList, sampleRow } from './sample-rows';
 
@@ -116,6 +118,65 @@ describe('Register', () => {
     asked().flush(sampleList([sampleRow('1')]));
     await settle();
     expect(element().querySelector<HTMLInputElement>('input[type=search]')?.value).toBe('hat ');
+  });
+
+  it('searches again for the same after the search was taken out of the address', async () => {
+    (await open('/parts?search=hat')).flush(sampleList([sampleRow('1')]));
+    await settle();
+    const search = async (text: string): Promise<void> => {
+      jasmine.clock().install().mockDate();
+      try {
+        const box = element().querySelector<HTMLInputElement>('input[type=search]')!;
+        box.value = text;
+        box.dispatchEvent(new Event('input'));
+        jasmine.clock().tick(300);
+      } finally {
+        jasmine.clock().uninstall();
+      }
+      await settle();
+      await settle();
+    };
+    await search('z');
+    asked().flush(sampleList([]));
+    await TestBed.inject(Router).navigateByUrl('/parts');
+    await settle();
+    asked().flush(sampleList([sampleRow('1')]));
+    await settle();
+    await search('z');
+    expect(TestBed.inject(Router).url).toBe('/parts?search=z');
+    asked().flush(sampleList([]));
+  });
+
+  it('asks for nothing when the box says what the address says already', async () => {
+    (await open('/parts?search=hat')).flush(sampleList([sampleRow('1')]));
+    await settle();
+    const navigate = spyOn(TestBed.inject(Router), 'navigate').and.callThrough();
+    jasmine.clock().install().mockDate();
+    try {
+      const box = element().querySelector<HTMLInputElement>('input[type=search]')!;
+      for (const text of ['hats', 'hat']) {
+        box.value = text;
+        box.dispatchEvent(new Event('input'));
+      }
+      jasmine.clock().tick(300);
+    } finally {
+      jasmine.clock().uninstall();
+    }
+    expect(navigate).not.toHaveBeenCalled();
+  });
+
+  it('never reads on in a list that another search has replaced', async () => {
+    (await open()).flush(sampleList([sampleRow('1')], { next: 'after-1', total: 2 }));
+    await settle();
+    await TestBed.inject(Router).navigateByUrl('/parts?search=hat');
+    await settle();
+    backend.match((request) => request.params.has('after'));
+    const searched = asked();
+    page.fixture.debugElement.query(By.directive(Register)).injector.get(PartsList).more();
+    backend.expectNone((request) => request.params.has('after'));
+    searched.flush(sampleList([sampleRow('2')]));
+    await settle();
+    expect(element().querySelectorAll('tr[mat-row]')).toHaveSize(1);
   });
 
   it('filters and sorts by way of the address', async () => {

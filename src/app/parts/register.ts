@@ -9,7 +9,7 @@ import { MatProgressBarModule } from '@angular/material/progress-bar';
 import { MatSelectModule } from '@angular/material/select';
 import { MatTooltipModule } from '@angular/material/tooltip';
 import { Router, RouterLink } from '@angular/router';
-import { debounceTime, distinctUntilChanged, map } from 'rxjs';
+import { debounceTime, filter, map } from 'rxjs';
 import type { PartQuery } from '../server/server';
 import { SessionStore } from '../session/session-store';
 import { Icon } from '../ui/icon';
@@ -95,7 +95,7 @@ export class Register {
       .pipe(
         debounceTime(250),
         map((text) => text.trim()),
-        distinctUntilChanged(),
+        filter((search) => search !== (this.search() ?? '')),
         takeUntilDestroyed(),
       )
       .subscribe((search) => void this.go({ search: search || null }, true));

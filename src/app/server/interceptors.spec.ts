@@ -60,6 +60,19 @@ describe('the interceptors', () => {
     expect(reachability.reachable()).toBeTrue();
   });
 
+  it('read the words of a refusal also where a file was asked for', async () => {
+    const refused = new Promise((resolve) =>
+      http.get('/api/file', { responseType: 'blob' }).subscribe({ next: resolve, error: resolve }),
+    );
+    const body = JSON.stringify({ type: PROBLEM.notFound, title: 'There is nothing here.', status: 404 });
+    backend
+      .expectOne('/api/file')
+      .flush(new Blob([body], { type: 'application/problem+json' }), { status: 404, statusText: '' });
+    const problem = (await refused) as ServerProblem;
+    expect(problem.is('notFound')).toBeTrue();
+    expect(problem.message).toBe('There is nothing here.');
+  });
+
   it('sign in again in place and repeat the request with the new token', async () => {
     TestBed.inject(CsrfToken).value = 'old';
     again.and.callFake(() => {

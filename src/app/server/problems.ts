@@ -1,6 +1,6 @@
 import { HttpErrorResponse, type HttpInterceptorFn } from '@angular/common/http';
 import { inject } from '@angular/core';
-import { catchError, tap, throwError } from 'rxjs';
+import { catchError, from, type Observable, of, switchMap, tap, throwError } from 'rxjs';
 import { Reachability } from './reachability';
 import { ServerProblem } from './server-problem';
 
@@ -11,10 +11,27 @@ export const problems: HttpInterceptorFn = (request, next) => {
     tap(() => reachability.answered()),
     catchError((error: unknown) => {
       if (!(error instanceof HttpErrorResponse)) return throwError(() => error);
-      const problem = ServerProblem.of(error);
-      if (problem.kind === 'unreachable') reachability.lost();
-      else reachability.answered();
-      return throwError(() => problem);
+      return bodyOf(error).pipe(
+        switchMap((body) => {
+          const problem = ServerProblem.of(error, body);
+          if (problem.kind === 'unreachable') reachability.lost();
+          else reachability.answered();
+          return throwError(() => problem);
+        }),
+      );
     }),
   );
 };
+
+/** Where a file was asked for, the words of a refusal come as a file too. */
+function bodyOf({ error }: HttpErrorResponse): Observable<unknown> {
+  return error instanceof Blob ? from(error.text().then(parsed)) : of<unknown>(error);
+}
+
+function parsed(text: string): unknown {
+  try {
+    return JSON.parse(text);
+  } catch {
+    return text;
+  }
+}

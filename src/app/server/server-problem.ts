@@ -40,10 +40,10 @@ export class ServerProblem extends Error {
     return this.type === PROBLEM[type];
   }
 
-  static of(response: HttpErrorResponse): ServerProblem {
+  static of(response: HttpErrorResponse, body: unknown = response.error): ServerProblem {
     const wait = Number(response.headers.get('Retry-After') ?? Number.NaN);
     const retryAfter = Number.isFinite(wait) ? wait : null;
-    const problem = readProblem(response.error);
+    const problem = readProblem(body);
     // A proxy in front of a stopped server answers 502–504 in its own words: the shop's server was not reached.
     const gateway = problem === null && response.status >= 502 && response.status <= 504;
     if (response.status === 0 || gateway) {

@@ -1,12 +1,19 @@
 import { HttpClient } from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
-import type { ChangePart, CreatePart, ListParts, Part, PartList } from '@shared/contracts/parts';
+import type { CreatePart, ListParts, Part, PartList } from '@shared/contracts/parts';
 import type { PaperSize } from '@shared/contracts/papers';
 import type { Revision, SaveRevision } from '@shared/contracts/revisions';
 import type { Session, SignIn } from '@shared/contracts/session';
-import type { Observable } from 'rxjs';
+import { map, type Observable } from 'rxjs';
+import { fileNameOf } from './file-name';
 
 export type PartQuery = Omit<ListParts, 'limit'> & { readonly limit?: number };
+
+/** A file as the server made and named it. */
+export interface ServedFile {
+  readonly name: string;
+  readonly content: Blob;
+}
 
 /** Every request the app makes. All fail with a `ServerProblem`. */
 @Injectable({ providedIn: 'root' })
@@ -39,17 +46,18 @@ export class Server {
     return this.http.get<Part>(`/api/parts/${encodeURIComponent(id)}`);
   }
 
-  changePart(id: string, change: ChangePart): Observable<Part> {
-    return this.http.patch<Part>(`/api/parts/${encodeURIComponent(id)}`, change);
-  }
-
   saveRevision(id: string, letter: string, save: SaveRevision): Observable<Revision> {
     return this.http.put<Revision>(revisionPath(id, letter), save);
   }
 
-  /** For a link: the browser opens the PDF itself. */
-  blankPaper(id: string, letter: string, size: PaperSize): string {
-    return `${revisionPath(id, letter)}/blank.pdf?size=${size}`;
+  blankPaper(id: string, letter: string, size: PaperSize): Observable<ServedFile> {
+    const asked = { params: { size }, responseType: 'blob', observe: 'response' } as const;
+    return this.http.get(`${revisionPath(id, letter)}/blank.pdf`, asked).pipe(
+      map(({ body, headers }) => ({
+        content: body ?? new Blob(),
+        name: fileNameOf(headers.get('Content-Disposition')) ?? 'blank.pdf',
+      })),
+    );
   }
 }
 

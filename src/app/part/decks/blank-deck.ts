@@ -8,12 +8,12 @@ import {
   viewChild,
 } from '@angular/core';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
-import { formatAngle } from '@shared/units/format';
+import { GRAIN_WORDS, UNIT_WORDS } from '@shared/part/words';
 import { BLANK_LINES, blankDrawing, type BlankLines, SIDE_LETTERS } from '../../drawing/blank-drawing';
 import { DrawingView } from '../../drawing/drawing-view';
 import { elementSize } from '../../drawing/element-size';
 import { PartEditor } from '../editing/part-editor';
-import { bendName, bendSentence, faceUp, UNIT_WORDS } from '../words';
+import { bendSentence } from '../words';
 
 /** The blank with everything that is marked on it. */
 @Component({
@@ -33,6 +33,9 @@ export class BlankDeck {
   protected readonly letters = SIDE_LETTERS;
   protected readonly lines = signal<BlankLines>('tangents');
 
+  protected readonly grain = computed(() => this.editor.document().grain ?? null);
+  protected readonly grainWords = GRAIN_WORDS;
+
   protected readonly drawing = computed(() => {
     const solved = this.editor.drawn();
     const { width } = this.size();
@@ -40,13 +43,8 @@ export class BlankDeck {
     return blankDrawing(solved, {
       width,
       lines: this.lines(),
-      selected: this.editor.selection(),
       figureOf: this.editor.figureOf(),
-      grain: this.editor.document().grain ?? null,
-      noteOf: (index) => {
-        const bend = solved.bends[index];
-        return bend ? [bendName(index), faceUp(bend), formatAngle(bend.angle)] : ['', '', ''];
-      },
+      grain: this.grain(),
     });
   });
   protected readonly says = computed(() => {

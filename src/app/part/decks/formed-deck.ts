@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, type ElementRef, inject, viewChild } from '@angular/core';
-import { formatAngle } from '@shared/units/format';
+import { inOneLine, legName, lineNote } from '@shared/part/words';
 import { DrawingView } from '../../drawing/drawing-view';
 import { elementSize } from '../../drawing/element-size';
 import { formedDrawing } from '../../drawing/formed-drawing';
+import { NO_OVERLAY } from '../../drawing/marks';
 import { PartEditor } from '../editing/part-editor';
-import { bendName, bendSentence, faceUp } from '../words';
+import { bendSentence } from '../words';
 
 /** The part as it will be: true faces, dimensions, mold points. */
 @Component({
@@ -27,25 +28,26 @@ export class FormedDeck {
     return formedDrawing(solved, {
       width,
       height,
-      selected: this.editor.selection(),
       figureOf,
-      noteOf: (index) => {
+      notesOf: (index) => {
         const bend = solved.bends[index];
-        if (!bend) return ['', ''];
+        if (!bend) return [];
         const setback = bend.setback === null ? '—' : figureOf(bend.setback);
+        const lower = `BA ${figureOf(bend.allowance)} · SB ${setback}`;
+        const note = lineNote(bend, index);
         return [
-          `${bendName(index)} · ${faceUp(bend)} · ${formatAngle(bend.angle)}`,
-          `BA ${figureOf(bend.allowance)} · SB ${setback}`,
+          { upper: inOneLine(note), lower },
+          { upper: `${note.line} · ${note.face} · ${note.angle}`, lower },
         ];
       },
     });
   });
+  protected readonly note = computed(() => this.drawing()?.noteOn(this.editor.selection()) ?? NO_OVERLAY);
   protected readonly level = computed(() => {
     const solved = this.editor.drawn();
     const seat = solved?.formed?.envelope?.seat;
     if (!solved || seat === undefined) return '';
-    const name = solved.legs[seat]?.name;
-    return name ? `${name} level` : `leg ${seat + 1} level`;
+    return `${legName(solved.legs[seat]?.name ?? null, seat)} level`;
   });
   /** Why there is no drawing: the stops that stand in its way, in the engine's words. */
   protected readonly why = computed(() => {

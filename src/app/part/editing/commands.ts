@@ -11,6 +11,10 @@ export interface Command {
   readonly keys: readonly string[];
   readonly when: (editor: PartEditor) => boolean;
   readonly run: (editor: PartEditor) => void;
+  /** What comes next is done in the row that is selected then. */
+  readonly goesOn?: true;
+  /** Its key takes away, so that in a box that holds text it is the box's. */
+  readonly yieldsToText?: true;
 }
 
 export type CommandId = 'undo' | 'redo' | 'add-at-end' | 'add-at-start' | 'add-after' | 'remove-bend' | 'deselect';
@@ -46,6 +50,7 @@ export const COMMANDS: readonly Command[] = [
       editor.apply((document) => addLegAfter(document, last));
       editor.select(last + 2);
     },
+    goesOn: true,
   },
   {
     id: 'add-at-start',
@@ -56,6 +61,7 @@ export const COMMANDS: readonly Command[] = [
       editor.apply(addLegAtStart);
       editor.select(0);
     },
+    goesOn: true,
   },
   {
     id: 'add-after',
@@ -67,6 +73,7 @@ export const COMMANDS: readonly Command[] = [
       editor.apply((document) => addLegAfter(document, index));
       editor.select(index + 2);
     },
+    goesOn: true,
   },
   {
     id: 'remove-bend',
@@ -81,6 +88,8 @@ export const COMMANDS: readonly Command[] = [
       editor.apply((document) => removeBend(document, index));
       editor.select(index - 1);
     },
+    goesOn: true,
+    yieldsToText: true,
   },
   {
     id: 'deselect',
@@ -106,5 +115,11 @@ export function keyOf(event: Pick<KeyboardEvent, 'key' | 'ctrlKey' | 'metaKey' |
   return [...held.filter((name) => name !== ''), key].join('+');
 }
 
-export const commandFor = (key: string, editor: PartEditor): Command | null =>
-  COMMANDS.find((command) => command.keys.includes(key) && command.when(editor)) ?? null;
+/** @param target what has the focus */
+export function commandFor(key: string, editor: PartEditor, target: EventTarget | null = null): Command | null {
+  const command = COMMANDS.find((one) => one.keys.includes(key) && one.when(editor)) ?? null;
+  return command?.yieldsToText && holdsText(target) ? null : command;
+}
+
+const holdsText = (target: EventTarget | null): boolean =>
+  (target instanceof HTMLInputElement || target instanceof HTMLTextAreaElement) && target.value !== '';

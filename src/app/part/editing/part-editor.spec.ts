@@ -5,6 +5,7 @@ import { NEVER } from 'rxjs';
 import { Server } from '../../server/server';
 import { channel, part } from '../sample-part';
 import { Autosave } from '../saving/autosave';
+import { LeftBehind } from '../saving/left-behind';
 import { commandFor, commandOf, keyOf } from './commands';
 import { PartEditor } from './part-editor';
 
@@ -15,7 +16,13 @@ describe('the editor of a part', () => {
     localStorage.clear();
     const server = { saveRevision: () => NEVER };
     TestBed.configureTestingModule({
-      providers: [provideZonelessChangeDetection(), Autosave, PartEditor, { provide: Server, useValue: server }],
+      providers: [
+        provideZonelessChangeDetection(),
+        Autosave,
+        LeftBehind,
+        PartEditor,
+        { provide: Server, useValue: server },
+      ],
     });
     editor = TestBed.inject(PartEditor);
     editor.open(part(), 'me', true);
@@ -26,6 +33,17 @@ describe('the editor of a part', () => {
   const setWeb = (typed: string | number, gesture: string | null = null): void =>
     editor.apply((document) => setLegDimension(document, 2, typed), gesture);
   const flats = (): string[] => editor.drawn()!.legs.map((leg) => leg.flat.toFixed(2));
+
+  it('counts a typed chain as not taken while it differs from the chain as it stands', () => {
+    const autosave = TestBed.inject(Autosave);
+    editor.typeChain('1 up 90 r.16 2 up 90 1');
+    expect(autosave.untaken()).toBeNull();
+    editor.typeChain('1 up 90 r.16 2 up 90 3');
+    expect(editor.typedChain()).toBe('1 up 90 r.16 2 up 90 3');
+    expect(autosave.untaken()).toBe('1 up 90 r.16 2 up 90 3');
+    editor.typeChain(null);
+    expect(autosave.untaken()).toBeNull();
+  });
 
   it('computes the handbook channel', () => {
     expect(flats()).toEqual(['0.80', '1.60', '0.80']);

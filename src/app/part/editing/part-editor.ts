@@ -1,6 +1,7 @@
 import { computed, inject, Injectable, linkedSignal, signal } from '@angular/core';
 import type { Part } from '@shared/contracts/parts';
 import { isJoggle, isLeg, type PartDocument, type Unit } from '@shared/part/document';
+import { printTypedChain } from '@shared/part/typed-chain';
 import type { SolveResult, Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { convertLength } from '@shared/units/length';
@@ -27,9 +28,12 @@ export class PartEditor {
   private readonly history = signal<History<PartDocument>>(begin(EMPTY));
   private readonly picked = signal<number | null>(null);
   private readonly unitShown = signal<Unit | null>(null);
+  private readonly typed = signal<string | null>(null);
 
   readonly part = this.opened.asReadonly();
   readonly mayEdit = signal(false);
+  /** What stands in the box of the typed chain and is not taken; null while it shows the chain of the document. */
+  readonly typedChain = this.typed.asReadonly();
   readonly document = computed(() => this.history().present);
   readonly result = computed<SolveResult>(() => solve(this.document()));
   /** The newest result with figures; while something typed is broken, that of before, never that of another part. */
@@ -76,6 +80,7 @@ export class PartEditor {
     this.opened.set(part);
     this.mayEdit.set(mayEdit);
     this.picked.set(null);
+    this.typed.set(null);
     this.history.set(begin(part.revision.document));
     this.autosave.open(part, person);
   }
@@ -91,6 +96,11 @@ export class PartEditor {
   /** @param gesture changes under one name are one entry of the history until the gesture ends */
   apply(edit: Edit, gesture: string | null = null): void {
     if (this.mayEdit()) this.step((history) => change(history, edit(history.present), gesture));
+  }
+
+  typeChain(text: string | null): void {
+    this.typed.set(text);
+    this.autosave.typed(text === printTypedChain(this.document().chain) ? null : text);
   }
 
   endGesture(): void {

@@ -1,7 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { METHOD_WORDS } from '@shared/part/allowance-words';
 import type { Solved } from '@shared/result';
+import { convertMass, formatMass, MASS_UNIT } from '@shared/section/mass';
+import { NotCurrent } from '../../ui/not-current';
 import { PartEditor } from '../editing/part-editor';
-import { METHOD_WORDS } from '../words';
 
 interface Figure {
   readonly words: string;
@@ -11,13 +13,16 @@ interface Figure {
 }
 
 const NONE = '—';
-const POUNDS_PER_KILOGRAM = 1 / 0.45359237;
 
 /** The figures that a part is asked for, larger than their labels. */
 @Component({
   selector: 'lw-figures-strip',
+  imports: [NotCurrent],
   template: `
-    <dl [class.dimmed]="!editor.isCurrent()">
+    @if (!editor.isCurrent()) {
+      <lw-not-current />
+    }
+    <dl [class.old]="!editor.isCurrent()">
       @for (one of figures(); track one.words) {
         <div>
           <dt>{{ one.words }}</dt>
@@ -48,7 +53,7 @@ export class FiguresStrip {
       {
         words: `Blank, net, ${unit}`,
         figure: blank.length === null ? NONE : figure(blank.length),
-        more: blank.width === null ? '× width not said' : `× ${figure(blank.width)}`,
+        more: blank.width === null ? '× width not stated' : `× ${figure(blank.width)}`,
       },
     ];
     if (blank.trim.start + blank.trim.end > 0) {
@@ -68,24 +73,23 @@ export class FiguresStrip {
   });
 
   private mass({ blank: { mass, width, length } }: Solved): Figure {
-    const unit = this.editor.shownUnit() === 'in' ? 'lb' : 'kg';
+    const unit = MASS_UNIT[this.editor.shownUnit()];
     if (!mass) {
-      const more = length === null ? '' : width === null ? 'width not said' : 'material not known';
+      const material = this.editor.document().material === undefined ? 'material not stated' : 'density not known';
+      const more = length === null ? '' : width === null ? 'width not stated' : material;
       return { words: 'Mass', figure: NONE, more };
     }
-    const pounds = mass.unit === 'lb' ? mass.value : mass.value * POUNDS_PER_KILOGRAM;
-    const value = unit === mass.unit ? mass.value : unit === 'lb' ? pounds : mass.value / POUNDS_PER_KILOGRAM;
-    return { words: 'Mass', figure: value.toFixed(3), more: unit };
+    return { words: 'Mass', figure: formatMass(convertMass(mass.value, mass.unit, unit)), more: unit };
   }
 
   /** The K that was used or is implied; a span when the bends differ. */
   private allowance(solved: Solved): Figure {
     const method = METHOD_WORDS[this.editor.document().allowance.method];
     const ks = solved.bends.map((bend) => bend.kFactor);
-    if (ks.length === 0) return { words: 'Allowance by', figure: method, more: 'no bends', inWords: true };
+    if (ks.length === 0) return { words: 'Bend allowance', figure: method, more: 'no bends', inWords: true };
     const [low, high] = [Math.min(...ks).toFixed(3), Math.max(...ks).toFixed(3)];
     const others = new Set(solved.bends.map((bend) => bend.method)).size > 1 ? ', some bends by others' : '';
     const k = low === high ? low : `${low}–${high}`;
-    return { words: 'Allowance by', figure: method, more: `K ${k}${others}`, inWords: true };
+    return { words: 'Bend allowance', figure: method, more: `K ${k}${others}`, inWords: true };
   }
 }

@@ -1,4 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { UNIT_WORDS } from '@shared/part/words';
+import { NotCurrent } from '../../ui/not-current';
 import { PartEditor } from '../editing/part-editor';
 import { gatheredFindings } from './gathered-findings';
 
@@ -9,6 +11,7 @@ const HAS_A_BOX =
 /** What is to be said about the part; a click on a place shows it. */
 @Component({
   selector: 'lw-findings-list',
+  imports: [NotCurrent],
   templateUrl: './findings-list.html',
   styleUrl: './findings-list.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -19,6 +22,11 @@ export class FindingsList {
   protected readonly findings = computed(() => {
     const solved = this.editor.drawn();
     return solved ? gatheredFindings(solved) : [];
+  });
+  /** Sentences come from the engine in the part's own unit; said only where the other one is shown. */
+  protected readonly ownUnit = computed(() => {
+    const unit = this.editor.drawn()?.unit;
+    return unit === undefined || unit === this.editor.shownUnit() ? null : UNIT_WORDS[unit];
   });
   protected readonly elsewhere = computed(() =>
     [...this.editor.messages()].filter(([path]) => !HAS_A_BOX.test(path)).map(([path, message]) => ({ path, message })),

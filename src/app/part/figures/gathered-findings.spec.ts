@@ -30,6 +30,13 @@ describe('gathered findings', () => {
     expect(one?.words).toBe('is too short.');
   });
 
+  it('name a leg without a name once, though a sentence begins with a capital', () => {
+    const nameless: Solved = solve({ ...channel, chain: [{ leg: 0.1 }, ...channel.chain.slice(1)] }) as Solved;
+    const [one] = gatheredFindings(nameless);
+    expect(one?.places[0]?.words).toMatch(/^leg 1$/i);
+    expect(one?.words).toMatch(/^is 0\.1 in/);
+  });
+
   it('say once what is said of several bends', () => {
     const solved = withFindings(
       finding('caution', 'chain/1', 'L1 is tight.'),

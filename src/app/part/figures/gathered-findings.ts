@@ -1,5 +1,5 @@
+import { FINDING_LEVELS, placesOf, placeWords } from '@shared/part/finding-words';
 import type { Finding, FindingLevel, Solved } from '@shared/result';
-import { LEVELS, placesOf, placeWords } from '../words';
 
 export interface FindingPlace {
   readonly words: string;
@@ -17,7 +17,7 @@ export interface GatheredFinding {
 /** Stops first, then cautions, then notes; what is said of several bends in the same words is said once. */
 export function gatheredFindings(solved: Solved): GatheredFinding[] {
   const gathered = new Map<string, GatheredFinding>();
-  const ranked = [...solved.findings].sort((a, b) => LEVELS.indexOf(a.level) - LEVELS.indexOf(b.level));
+  const ranked = [...solved.findings].sort((a, b) => FINDING_LEVELS.indexOf(a.level) - FINDING_LEVELS.indexOf(b.level));
   for (const finding of ranked) {
     const place = placeOf(solved, finding);
     const words = wordsOf(finding, place);
@@ -34,13 +34,15 @@ const placeOf = (solved: Solved, { at }: Finding): FindingPlace => ({
   chain: placesOf(at)[0] ?? null,
 });
 
-/** Most messages begin with the name of their place, which stands before them anyway. */
-const wordsOf = ({ message }: Finding, { words }: FindingPlace): string =>
-  words !== '' && message.startsWith(`${words} `) ? message.slice(words.length + 1) : message;
+/** Most messages begin with the name of their place, which stands before them anyway; a sentence begins with a capital. */
+function wordsOf({ message }: Finding, { words }: FindingPlace): string {
+  const named = words !== '' && message.slice(0, words.length + 1).toLowerCase() === `${words} `.toLowerCase();
+  return named ? message.slice(words.length + 1) : message;
+}
 
 /** "1 stop, 24 cautions"; empty when there is nothing. */
 export function findingCounts(solved: Solved): string {
-  return LEVELS.flatMap((level) => {
+  return FINDING_LEVELS.flatMap((level) => {
     const count = solved.findings.filter((finding) => finding.level === level).length;
     return count === 0 ? [] : [`${count} ${level}${count === 1 ? '' : 's'}`];
   }).join(', ');

@@ -1,7 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { formatAngle, nearest64Of } from '@shared/units/format';
+import { angleWords, faceUp, lineName, UNIT_WORDS } from '@shared/part/words';
+import { missText, nearest64Of } from '@shared/units/format';
+import { NotCurrent } from '../../ui/not-current';
 import { PartEditor } from '../editing/part-editor';
-import { bendName, faceUp, UNIT_WORDS } from '../words';
 
 interface Station {
   readonly figure: string;
@@ -20,6 +21,7 @@ const COLUMNS = [
 /** Every station of every bend in figures: decimal, and the nearest 1/64 in with what it misses by. */
 @Component({
   selector: 'lw-stations-table',
+  imports: [NotCurrent],
   templateUrl: './stations-table.html',
   styleUrl: './stations-table.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -36,14 +38,12 @@ export class StationsTable {
     const station = (value: number | null | undefined): Station | null => {
       if (value === null || value === undefined) return null;
       const { text, error } = nearest64Of(value, solved.unit);
-      const thousandths = Math.abs(error).toFixed(4);
-      const sign = Number(thousandths) === 0 ? '' : error < 0 ? '−' : '+';
-      return { figure: figure(value), sixtyfourth: text, miss: `${sign}${thousandths}` };
+      return { figure: figure(value), sixtyfourth: text, miss: missText(error) };
     };
     return solved.bends.map((bend, index) => ({
       chain: bend.chain,
-      name: bendName(index),
-      note: `${faceUp(bend)} · ${formatAngle(bend.angle)}`,
+      name: lineName(index),
+      note: `${faceUp(bend)} · ${angleWords(bend.angle)}`,
       allowance: figure(bend.allowance),
       stations: [
         station(bend.tangentStart),

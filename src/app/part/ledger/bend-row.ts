@@ -6,15 +6,16 @@ import { setBendAngle } from '@shared/part/edits/set-bend-angle';
 import { setName } from '@shared/part/edits/set-name';
 import { setRadius } from '@shared/part/edits/set-radius';
 import { setTurn } from '@shared/part/edits/set-turn';
+import { between, betweenLegs } from '@shared/part/words';
 import { PartEditor } from '../editing/part-editor';
-import { needsReading, typedExpression } from '../editing/typed-expression';
-import { between, betweenLegs } from '../words';
-import { ExpressionField } from './expression-field';
+import { needsReading, typedExpression } from '../../ui/typed-expression';
+import { ExpressionField } from '../../ui/expression-field';
+import { NameBox } from './name-box';
 import { TurnGlyph } from './turn-glyph';
 
 @Component({
   selector: 'lw-bend-row',
-  imports: [ExpressionField, MatButtonModule, TurnGlyph],
+  imports: [ExpressionField, MatButtonModule, NameBox, TurnGlyph],
   templateUrl: './bend-row.html',
   styleUrl: './row.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -6,8 +6,8 @@ import { setJoggle } from '@shared/part/edits/set-joggle';
 import { setRadius } from '@shared/part/edits/set-radius';
 import { setTurn } from '@shared/part/edits/set-turn';
 import { PartEditor } from '../editing/part-editor';
-import { typedExpression } from '../editing/typed-expression';
-import { ExpressionField } from './expression-field';
+import { typedExpression } from '../../ui/typed-expression';
+import { ExpressionField } from '../../ui/expression-field';
 
 @Component({
   selector: 'lw-joggle-row',

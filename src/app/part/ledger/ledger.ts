@@ -4,6 +4,7 @@ import {
   ChangeDetectionStrategy,
   Component,
   computed,
+  effect,
   ElementRef,
   inject,
   Injector,
@@ -53,6 +54,7 @@ export class Ledger {
 
   constructor() {
     afterRenderEffect({ write: () => this.bringIntoView(this.editor.selection()) });
+    effect(() => this.holdFocus(this.rows().length, this.editor.selection()));
   }
 
   protected add(command: Command): void {
@@ -61,9 +63,8 @@ export class Ledger {
   }
 
   /** The box that was in use is gone or done with: on in the row that is selected now. */
-  protected goOn(): void {
-    const focus = (): void => this.rowAt(this.editor.selection())?.querySelector<HTMLInputElement>(VALUE)?.focus();
-    afterNextRender({ read: focus }, { injector: this.injector });
+  goOn(): void {
+    afterNextRender({ read: () => this.focusRow(this.editor.selection()) }, { injector: this.injector });
   }
 
   /** Whatever is clicked or comes into focus selects its row. */
@@ -72,7 +73,7 @@ export class Ledger {
     if (row) this.editor.select(Number(row.getAttribute('data-row')));
   }
 
-  /** Enter and Tab go down to the next figure, the arrows stay in their column. */
+  /** Enter goes down to the next figure, the arrows stay in their column; Tab reaches everything, as it does anywhere. */
   protected move(event: KeyboardEvent): void {
     const target = event.target;
     if (!(target instanceof HTMLInputElement) || event.ctrlKey || event.metaKey || event.altKey) return;
@@ -81,7 +82,25 @@ export class Ledger {
     const down = event.key === 'ArrowDown';
     if (down || event.key === 'ArrowUp') this.go(event, target, column, down ? 1 : -1);
     else if (event.key === 'Enter') this.go(event, target, 'value', event.shiftKey ? -1 : 1);
-    else if (event.key === 'Tab' && !event.shiftKey) this.tab(event, target);
+  }
+
+  /**
+   * A row may go while it has the focus, as by undo, and so may what a row shows only while it is selected. Asked for before
+   * the rows are drawn anew; the focus that has gone with them goes to the row that stands there then.
+   */
+  private holdFocus(rows: number, selection: number | null): void {
+    const held = document.activeElement;
+    if (held === null || !this.host.nativeElement.contains(held)) return;
+    const row = held.closest('[data-row]')?.getAttribute('data-row');
+    const nearest = Math.min(Number(row ?? rows - 1), rows - 1);
+    const mend = (): void => {
+      if (!held.isConnected && document.activeElement === document.body) this.focusRow(selection ?? nearest);
+    };
+    afterNextRender({ read: mend }, { injector: this.injector });
+  }
+
+  private focusRow(index: number | null): void {
+    this.rowAt(index)?.querySelector<HTMLInputElement>(VALUE)?.focus();
   }
 
   private rowAt(index: number | null): HTMLElement | null {
@@ -96,12 +115,6 @@ export class Ledger {
     const [inner, outer] = [row.getBoundingClientRect(), frame.getBoundingClientRect()];
     if (inner.top < outer.top) frame.scrollTop -= outer.top - inner.top;
     else if (inner.bottom > outer.bottom) frame.scrollTop += inner.bottom - outer.bottom;
-  }
-
-  /** Within a row Tab does what it does anywhere; from its last figure it goes down, past the choices beside it. */
-  private tab(event: KeyboardEvent, from: HTMLInputElement): void {
-    const figures = from.closest('[data-row]')?.querySelectorAll('input[data-cell]');
-    if (figures && figures[figures.length - 1] === from) this.go(event, from, 'value', 1);
   }
 
   /** Where there is no further row the key does what it does anywhere. */

@@ -4,15 +4,17 @@ import { type ChainEntry, isLeg, type Leg, type Measure } from '@shared/part/doc
 import { setLegDimension } from '@shared/part/edits/set-leg-dimension';
 import { setMeasure } from '@shared/part/edits/set-measure';
 import { setName } from '@shared/part/edits/set-name';
+import { measureEnds, MEASURES } from '@shared/part/measure';
+import { MEASURE_WORDS } from '@shared/part/words';
 import { commandOf } from '../editing/commands';
 import { PartEditor } from '../editing/part-editor';
-import { needsReading, typedExpression } from '../editing/typed-expression';
-import { MEASURE_WORDS, MEASURES } from '../words';
-import { ExpressionField } from './expression-field';
+import { needsReading, typedExpression } from '../../ui/typed-expression';
+import { ExpressionField } from '../../ui/expression-field';
+import { NameBox } from './name-box';
 
 @Component({
   selector: 'lw-leg-row',
-  imports: [ExpressionField, MatButtonModule],
+  imports: [ExpressionField, MatButtonModule, NameBox],
   templateUrl: './leg-row.html',
   styleUrl: './row.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -32,10 +34,7 @@ export class LegRow {
     const entry: ChainEntry | undefined = this.editor.document().chain[this.index()];
     return entry && isLeg(entry) ? entry : { leg: '' };
   });
-  protected readonly ends = computed((): readonly [Measure, Measure] => {
-    const measure = this.leg().measure ?? 'mold-line';
-    return typeof measure === 'string' ? [measure, measure] : measure;
-  });
+  protected readonly ends = computed(() => measureEnds(this.leg()));
   protected readonly sameEnds = computed(() => this.ends()[0] === this.ends()[1]);
   protected readonly selected = computed(() => this.editor.selection() === this.index());
   /** Only a leg between two bends has two ends that can differ. */

@@ -5,11 +5,14 @@ import { PROBLEM } from '@shared/contracts/problem';
 import type { Revision, SaveRevision } from '@shared/contracts/revisions';
 import type { PartDocument } from '@shared/part/document';
 import { Subject } from 'rxjs';
+import { Reachability } from '../../server/reachability';
 import { Server } from '../../server/server';
 import { ServerProblem } from '../../server/server-problem';
 import { channel, part, revision } from '../sample-part';
 import { Autosave } from './autosave';
-import { LocalCopies } from './local-copies';
+import { LeftBehind } from './left-behind';
+import { LocalCopies, type LocalCopy } from './local-copies';
+import { OpenVisits } from './open-visits';
 
 interface Sent {
   readonly save: SaveRevision;
@@ -29,6 +32,7 @@ describe('autosave', () => {
   let sent: Sent[];
   let autosave: Autosave;
   let copies: LocalCopies;
+  let opened: PartDocument;
 
   beforeEach(() => {
     jasmine.clock().install();
@@ -42,11 +46,13 @@ describe('autosave', () => {
       },
     };
     TestBed.configureTestingModule({
-      providers: [provideZonelessChangeDetection(), Autosave, { provide: Server, useValue: server }],
+      providers: [provideZonelessChangeDetection(), Autosave, LeftBehind, { provide: Server, useValue: server }],
     });
     autosave = TestBed.inject(Autosave);
     copies = TestBed.inject(LocalCopies);
-    autosave.open(part(), 'me');
+    const first = part();
+    opened = first.revision.document;
+    autosave.open(first, 'me');
   });
 
   afterEach(() => {
@@ -61,6 +67,12 @@ describe('autosave', () => {
     one.answer.next(revision(one.save.document, version));
     one.answer.complete();
   };
+
+  const copyOf = (id: string, person = 'me'): LocalCopy | null => copies.all(person, id, 'A')[0]?.copy ?? null;
+  const looked = async (): Promise<void> => {
+    for (let turn = 0; turn < 5; turn += 1) await Promise.resolve();
+  };
+  const lose = (index: number): void => sent[index]!.answer.error(lost());
 
   it('saves once, a moment after the last change, from the version it started from', () => {
     edit(thicker(0.05));
@@ -89,10 +101,10 @@ describe('autosave', () => {
 
   it('keeps a copy in the browser until the server confirms', () => {
     edit(thicker(0.05));
-    expect(copies.read('me', 'p1', 'A')?.document).toEqual(thicker(0.05));
+    expect(copyOf('p1')?.document).toEqual(thicker(0.05));
     wait(900);
     confirm(0, 2);
-    expect(copies.read('me', 'p1', 'A')).toBeNull();
+    expect(copyOf('p1')).toBeNull();
   });
 
   it('does not send what the engine refuses, but keeps it', () => {
@@ -100,7 +112,7 @@ describe('autosave', () => {
     wait(5000);
     expect(sent.length).toBe(0);
     expect(autosave.state()).toEqual({ is: 'held', fields: 1 });
-    expect(copies.read('me', 'p1', 'A')?.document.thickness).toBe('abc');
+    expect(copyOf('p1')?.document?.thickness).toBe('abc');
     edit(thicker(0.05));
     wait(900);
     expect(sent.length).toBe(1);
@@ -169,28 +181,96 @@ describe('autosave', () => {
     wait(900);
     sent[1]!.answer.error(problem(401, PROBLEM.signedOut));
     expect(autosave.state().is).toBe('signed-out');
-    expect(copies.read('me', 'p1', 'A')?.document).toEqual(thicker(0.06));
+    expect(copyOf('p1')?.document).toEqual(thicker(0.06));
   });
 
-  it('offers the work that an earlier visit could not save, until that is settled', () => {
+  it('offers the work that earlier visits could not save, the newest first, until each is settled', async () => {
     edit(thicker(0.05));
     autosave.open(part(), 'me');
+    lose(0);
+    autosave.open(part(), 'me');
+    await looked();
     expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
+    wait(10);
     edit(thicker(0.06));
     autosave.open(part(), 'me');
+    lose(1);
+    autosave.open(part(), 'me');
+    await looked();
     expect(autosave.leftBehind()?.document).toEqual(thicker(0.06));
     autosave.settleCopy();
+    expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
+    autosave.settleCopy();
     autosave.open(part(), 'me');
+    await looked();
     expect(autosave.leftBehind()).toBeNull();
   });
 
-  it('does not offer what the server has already, nor the work of somebody else', () => {
+  it('does not offer what the server has already, nor the work of somebody else', async () => {
     edit(thicker(0.05));
-    autosave.open(part(thicker(0.05), 2), 'me');
+    autosave.open(part(), 'me');
+    lose(0);
+    const turned = Object.fromEntries(Object.entries(thicker(0.05)).reverse()) as unknown as PartDocument;
+    autosave.open(part(turned, 2), 'me');
+    await looked();
     expect(autosave.leftBehind()).toBeNull();
+    expect(localStorage.length).toBe(0);
     edit(thicker(0.06));
     autosave.open(part(), 'another');
+    lose(1);
+    autosave.open(part(), 'another');
+    await looked();
     expect(autosave.leftBehind()).toBeNull();
+  });
+
+  it('leaves the copy alone that another tab works with, and offers it once that tab is gone', async () => {
+    const elsewhere = new OpenVisits();
+    const stay = { person: 'me', part: 'p1', letter: 'A', visit: elsewhere.begin() };
+    copies.keep(stay, { document: thicker(0.05), typed: null, version: 1, keptAt: '2026-01-05T10:00:00.000Z' });
+    autosave.open(part(), 'me');
+    await TestBed.inject(OpenVisits).ended([stay.visit]);
+    await looked();
+    expect(autosave.leftBehind()).toBeNull();
+    edit(thicker(0.06));
+    wait(900);
+    confirm(0, 2);
+    expect(copyOf('p1')?.document).toEqual(thicker(0.05));
+    elsewhere.ngOnDestroy();
+    autosave.open(part(), 'me');
+    wait(1000);
+    await looked();
+    expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
+  });
+
+  it('loses no copy where the browser has no room for another', async () => {
+    edit({ ...channel, thickness: 'abc' }, 1);
+    autosave.open(part(), 'me');
+    spyOn(Storage.prototype, 'setItem').and.throwError('full');
+    await looked();
+    edit({ ...channel, thickness: 'abd' }, 1);
+    expect(autosave.keepsCopy()).toBeFalse();
+    expect(autosave.atRisk).toBeTrue();
+    autosave.open(part(), 'me');
+    await looked();
+    expect(autosave.leftBehind()?.document?.thickness).toBe('abc');
+  });
+
+  it('keeps a typed chain that is not taken, beside a draft that is saved', async () => {
+    autosave.typed('1 upp');
+    expect(autosave.state().is).toBe('saved');
+    expect(autosave.untaken()).toBe('1 upp');
+    edit(thicker(0.05));
+    wait(900);
+    confirm(0, 2);
+    expect(copyOf('p1')).toEqual(jasmine.objectContaining({ document: null, typed: '1 upp' }));
+    autosave.open(part(thicker(0.05), 2), 'me');
+    await looked();
+    expect(autosave.untaken()).toBeNull();
+    expect(autosave.leftBehind()?.typed).toBe('1 upp');
+    autosave.settleCopy();
+    autosave.typed('1 up');
+    autosave.typed(null);
+    expect(localStorage.length).toBe(0);
   });
 
   it('sends what the part before still wanted when another one is opened, and keeps the two apart', () => {
@@ -199,10 +279,94 @@ describe('autosave', () => {
     expect(sent[0]?.save).toEqual({ version: 1, document: thicker(0.05) });
     expect(autosave.state().is).toBe('saved');
     confirm(0, 9);
-    expect(copies.read('me', 'p1', 'A')).toBeNull();
+    expect(copyOf('p1')).toBeNull();
     edit(thicker(0.07));
     wait(900);
     expect(sent[1]?.save).toEqual({ version: 1, document: thicker(0.07) });
+  });
+
+  it('never calls ours saved after a clash, also when ours is what the work began with', () => {
+    const theirs = revision(thicker(0.09), 7);
+    edit(thicker(0.05));
+    wait(900);
+    sent[0]!.answer.error(problem(409, PROBLEM.stale, { current: theirs }));
+    edit(opened);
+    expect(copyOf('p1')?.document).toEqual(opened);
+    autosave.saveOver(theirs);
+    edit(opened);
+    expect(autosave.state().is).toBe('waiting');
+    wait(900);
+    expect(sent[1]?.save).toEqual({ version: 7, document: opened });
+  });
+
+  for (const [words, error] of [
+    ['no answer', lost()],
+    ['an error of the server', problem(500, PROBLEM.internal)],
+    ['a wish to wait', problem(429, PROBLEM.tooManyAttempts)],
+  ] as const) {
+    it(`does not call the beginning saved after ${words}, and settles that save first`, () => {
+      edit(thicker(0.05));
+      wait(900);
+      sent[0]!.answer.error(error);
+      edit(opened);
+      expect(autosave.state().is).toBe('waiting');
+      wait(900);
+      expect(sent[1]?.save).toEqual({ version: 1, document: thicker(0.05) });
+      confirm(1, 2);
+      wait(900);
+      expect(sent[2]?.save).toEqual({ version: 2, document: opened });
+      confirm(2, 3);
+      expect(autosave.state().is).toBe('saved');
+    });
+  }
+
+  it('sends a save whose answer was lost again as it was, and the newer work after it', () => {
+    edit(thicker(0.05));
+    wait(900);
+    sent[0]!.answer.error(lost());
+    edit(thicker(0.06));
+    wait(900);
+    expect(sent[1]?.save).toEqual({ version: 1, document: thicker(0.05) });
+    confirm(1, 2);
+    expect(autosave.state().is).toBe('waiting');
+    wait(900);
+    expect(sent[2]?.save).toEqual({ version: 2, document: thicker(0.06) });
+  });
+
+  it('sends the newest when it is left while a save is on its way', () => {
+    edit(thicker(0.05));
+    wait(900);
+    edit(thicker(0.06));
+    TestBed.resetTestingModule();
+    expect(sent.length).toBe(1);
+    confirm(0, 2);
+    expect(sent[1]?.save).toEqual({ version: 2, document: thicker(0.06) });
+    confirm(1, 3);
+    expect(sent.length).toBe(2);
+    expect(localStorage.length).toBe(0);
+  });
+
+  it('sends at once when the server answers again', () => {
+    const reachability = TestBed.inject(Reachability);
+    edit(thicker(0.05));
+    wait(900);
+    reachability.lost();
+    sent[0]!.answer.error(lost());
+    TestBed.tick();
+    reachability.answered();
+    TestBed.tick();
+    wait(1);
+    expect(sent.length).toBe(2);
+  });
+
+  it('goes on with newer work when what was sent is refused', () => {
+    edit(thicker(0.05));
+    wait(900);
+    edit(thicker(0.06));
+    wait(900);
+    sent[0]!.answer.error(problem(422, PROBLEM.invalid, { errors: [] }));
+    wait(900);
+    expect(sent[1]?.save).toEqual({ version: 1, document: thicker(0.06) });
   });
 
   it('is saved again when everything is undone before it was sent', () => {

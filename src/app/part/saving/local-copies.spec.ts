@@ -1,11 +1,13 @@
 import { provideZonelessChangeDetection } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { channel } from '../sample-part';
-import { LocalCopies } from './local-copies';
+import { LocalCopies, type LocalCopy, type Stay } from './local-copies';
 
 describe('local copies', () => {
   let copies: LocalCopies;
-  const copy = { document: channel, version: 3, keptAt: '2026-01-05T10:00:00.000Z' };
+  const copy: LocalCopy = { document: channel, typed: null, version: 3, keptAt: '2026-01-05T10:00:00.000Z' };
+  const stay: Stay = { person: 'me', part: 'p1', letter: 'A', visit: 'first' };
+  const kept = (person = 'me', part = 'p1'): LocalCopy[] => copies.all(person, part, 'A').map((one) => one.copy);
 
   beforeEach(() => {
     localStorage.clear();
@@ -16,37 +18,44 @@ describe('local copies', () => {
   afterEach(() => localStorage.clear());
 
   it('come back as they were kept, to the one who kept them', () => {
-    expect(copies.keep('me', 'p1', 'A', copy)).toBeTrue();
-    expect(copies.read('me', 'p1', 'A')).toEqual(copy);
-    expect(copies.read('another', 'p1', 'A')).toBeNull();
-    expect(copies.read('me', 'p2', 'A')).toBeNull();
+    expect(copies.keep(stay, copy)).toBeTrue();
+    expect(kept()).toEqual([copy]);
+    expect(kept('another')).toEqual([]);
+    expect(kept('me', 'p2')).toEqual([]);
+    expect(kept('me', 'p')).toEqual([]);
   });
 
   it('are gone when they are dropped', () => {
-    copies.keep('me', 'p1', 'A', copy);
-    copies.drop('me', 'p1', 'A');
-    expect(copies.read('me', 'p1', 'A')).toBeNull();
+    copies.keep(stay, copy);
+    copies.drop(stay);
+    expect(kept()).toEqual([]);
   });
 
-  it('stay when they were set aside, until they are dropped there', () => {
-    copies.setAside('me', 'p1', 'A', copy);
-    copies.drop('me', 'p1', 'A');
-    expect(copies.read('me', 'p1', 'A')).toEqual(copy);
-    copies.dropAside('me', 'p1', 'A');
-    expect(copies.read('me', 'p1', 'A')).toBeNull();
+  it('of several visits stay apart, the newest first', () => {
+    const newer = { ...copy, typed: '1 up', document: null, keptAt: '2026-01-05T10:00:01.000Z' };
+    copies.keep(stay, copy);
+    copies.keep({ ...stay, visit: 'second' }, newer);
+    expect(copies.all('me', 'p1', 'A').map((one) => one.visit)).toEqual(['second', 'first']);
+    copies.drop({ ...stay, visit: 'second' });
+    expect(kept()).toEqual([copy]);
   });
 
   it('are not taken from what is no copy', () => {
-    for (const broken of ['{', 'null', '{"version":1}', '{"document":{"chain":3},"version":1,"keptAt":"x"}']) {
-      localStorage.setItem('lw-draft/me/p1/A', broken);
-      expect(copies.read('me', 'p1', 'A'))
-        .withContext(broken)
-        .toBeNull();
+    for (const broken of [
+      '{',
+      'null',
+      '{"version":1}',
+      '{"document":{"chain":3},"version":1,"keptAt":"x"}',
+      '{"document":null,"typed":null,"version":1,"keptAt":"x"}',
+      '{"document":null,"typed":3,"version":1,"keptAt":"x"}',
+    ]) {
+      localStorage.setItem('lw-draft/me/p1/A/first', broken);
+      expect(kept()).withContext(broken).toEqual([]);
     }
   });
 
   it('say so when the browser keeps nothing', () => {
     spyOn(Storage.prototype, 'setItem').and.throwError('full');
-    expect(copies.keep('me', 'p1', 'A', copy)).toBeFalse();
+    expect(copies.keep(stay, copy)).toBeFalse();
   });
 });

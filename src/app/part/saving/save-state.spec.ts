@@ -7,6 +7,13 @@ describe('the words about saving', () => {
     expect(saveWords({ is: 'saved', at: null })).toBe('saved');
   });
 
+  it('do not say plainly saved while a typed chain is not taken', () => {
+    expect(saveWords({ is: 'saved', at: new Date(2026, 0, 5, 9, 4, 7) }, true)).toBe(
+      'saved 09:04:07, but not the typed chain',
+    );
+    expect(saveWords({ is: 'saving' }, true)).toBe('saving');
+  });
+
   it('never say saved while it is not', () => {
     const others = [
       saveWords({ is: 'waiting' }),

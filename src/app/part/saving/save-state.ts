@@ -16,10 +16,13 @@ export type SaveState =
 const clock = (at: Date): string =>
   [at.getHours(), at.getMinutes(), at.getSeconds()].map((part) => String(part).padStart(2, '0')).join(':');
 
-export function saveWords(state: SaveState): string {
+/** @param untaken a typed chain is not taken: what is saved is not all that was typed */
+export function saveWords(state: SaveState, untaken = false): string {
   switch (state.is) {
-    case 'saved':
-      return state.at === null ? 'saved' : `saved ${clock(state.at)}`;
+    case 'saved': {
+      const saved = state.at === null ? 'saved' : `saved ${clock(state.at)}`;
+      return untaken ? `${saved}, but not the typed chain` : saved;
+    }
     case 'waiting':
     case 'saving':
       return 'saving';

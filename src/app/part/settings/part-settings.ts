@@ -1,12 +1,13 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { METHOD_WORDS } from '@shared/part/allowance-words';
 import type { Allowance, Hardness } from '@shared/part/document';
 import { setAllowance } from '@shared/part/edits/set-allowance';
 import { setGrain, setMaterial, setThickness, setWidth } from '@shared/part/edits/set-sheet';
 import { MATERIALS } from '@shared/reference/materials';
 import { PartEditor } from '../editing/part-editor';
-import { needsReading, typedExpression } from '../editing/typed-expression';
-import { ExpressionField } from '../ledger/expression-field';
-import { METHOD_WORDS, PART_METHODS } from '../words';
+import { needsReading, typedExpression } from '../../ui/typed-expression';
+import { ExpressionField } from '../../ui/expression-field';
+import { PART_METHODS } from '../words';
 
 const HARDNESSES: readonly Hardness[] = ['soft', 'medium', 'hard'];
 /** What a K-factor starts from when the method is chosen; a middle figure, to be replaced by the part's own. */

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { METHOD_WORDS } from '@shared/part/allowance-words';
 import { PartEditor } from '../editing/part-editor';
-import { METHOD_WORDS } from '../words';
 
 /** The sheet in a line: "0.040 in 2024-T3 · 6 in wide · grain across · handbook". */
 @Component({
@@ -19,11 +19,11 @@ export class SheetSummary {
 
   protected readonly words = computed(() => {
     const { unit, thickness, material, width, grain, allowance } = this.editor.document();
-    const name = typeof material === 'object' ? material.name : (material ?? 'material not said');
+    const name = typeof material === 'object' ? material.name : (material ?? 'material not stated');
     return [
       `${thickness} ${unit} ${name}`,
-      width === undefined ? 'width not said' : `${width} ${unit} wide`,
-      grain === undefined ? 'grain not known' : `grain ${grain}`,
+      width === undefined ? 'width not stated' : `${width} ${unit} wide`,
+      grain === undefined ? 'grain not stated' : `grain ${grain}`,
       METHOD_WORDS[allowance.method],
     ].join(' · ');
   });

@@ -1,19 +1,14 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  computed,
-  type ElementRef,
-  inject,
-  signal,
-  viewChild,
-} from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, type ElementRef, inject, viewChild } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import type { ChainEntry } from '@shared/part/document';
 import { replaceChain, whyChainStays } from '@shared/part/edits/replace-chain';
 import { parseTypedChain, printTypedChain, type TypedChain } from '@shared/part/typed-chain';
 import { solve } from '@shared/solve';
+import { announceAfterPause } from '../../ui/announce-after-pause';
 import { PartEditor } from '../editing/part-editor';
 import { chainWords } from './chain-words';
+
+const TAKES = 'Enter takes it.';
 
 interface Reading {
   readonly chain: readonly ChainEntry[] | null;
@@ -33,7 +28,7 @@ export class TypedChainBox {
   private readonly box = viewChild.required<ElementRef<HTMLTextAreaElement>>('box');
 
   /** What is being typed, or was and can't be taken; null when the box shows the chain as it stands. */
-  protected readonly draft = signal<string | null>(null);
+  protected readonly draft = this.editor.typedChain;
   protected readonly standing = computed(() => printTypedChain(this.editor.document().chain));
   protected readonly text = computed(() => this.draft() ?? this.standing());
   private readonly reading = computed((): Reading => {
@@ -46,10 +41,21 @@ export class TypedChainBox {
     const error = this.error();
     return error ? this.text().slice(error.start, error.end).trim() : '';
   });
+  protected readonly isTaken = computed(() => this.draft() === null || this.draft() === this.standing());
+  protected readonly takes = TAKES;
+
+  constructor() {
+    const words = computed(() => {
+      const error = this.error();
+      if (error) return `Typed chain: ${this.pointed()} ${error.message}`;
+      return this.isTaken() ? null : TAKES;
+    });
+    announceAfterPause(words, this.text);
+  }
 
   protected type(text: string): void {
     // One line, however it was pasted.
-    this.draft.set(text.replace(/\s*\n\s*/g, ' '));
+    this.editor.typeChain(text.replace(/\s*\n\s*/g, ' '));
   }
 
   protected enter(event: Event): void {
@@ -64,11 +70,12 @@ export class TypedChainBox {
     const { chain, errors } = this.reading();
     if (!chain || errors.length > 0) return;
     if (this.draft() !== this.standing()) this.editor.apply((document) => replaceChain(document, chain));
-    this.draft.set(null);
+    this.editor.typeChain(null);
   }
 
   protected putBack(): void {
-    this.draft.set(null);
+    this.editor.typeChain(null);
+    this.box().nativeElement.focus();
   }
 
   protected leave(event: Event): void {

@@ -2,9 +2,10 @@
  * Where labels go along a line when their places are too near each other: in the same order, `pitch` apart at least,
  * inside [low, high], each as near its place as the least squares of all moves allow.
  *
- * @param places wanted positions, ascending, mm
- * @param pitch least distance of two neighbours, mm (one figure, or one for each gap)
+ * @param places wanted positions, ascending
+ * @param pitch least distance of two neighbours (one figure, or one for each gap)
  * @returns the positions, or null when they don't fit
+ * @example spread([5, 5], 2, 0, 10) // [4, 6]
  */
 export function spread(
   places: readonly number[],

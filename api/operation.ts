@@ -3,10 +3,9 @@
  * A route that is not such a record does not exist, so the description can't fall behind.
  */
 import type { Request, Response } from 'express';
-import type { RequestHandler } from 'express';
 import type { z } from 'zod';
-import type { Access } from '../middleware/access';
-import type { ProblemKind } from '../middleware/problem';
+import type { Access } from './middleware/access';
+import type { ProblemKind } from './middleware/problem';
 
 export type Method = 'get' | 'post' | 'put' | 'patch' | 'delete';
 
@@ -36,8 +35,8 @@ interface OperationOf<Q, B> {
   readonly summary: string;
   readonly query?: Q;
   readonly body?: B;
-  /** Runs when the body is read and checked. */
-  readonly before?: readonly RequestHandler[];
+  /** Bytes that the body may have, where that is less than for others. */
+  readonly bodyLimit?: number;
   readonly answer: Answer;
   /** What it may refuse beyond what its access, query and body imply. */
   readonly refuses?: readonly ProblemKind[];

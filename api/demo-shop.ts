@@ -1,5 +1,5 @@
 /** The invented shop and its invented people. They exist in a demo shop only. */
-import type { Role } from '../../../shared/contracts/session';
+import type { Role } from '../shared/contracts/session';
 
 export const DEMO_SHOP_NAME = 'Harrow Creek';
 

@@ -1,13 +1,18 @@
 import type { Expression } from '@shared/part/document';
 
+/** One comma between figures and nothing else: it can only be the point of a decimal. */
+const DECIMAL_COMMA = /^-?\d*,\d+$/;
+
 /**
  * What was typed in a box, as the document keeps it: a figure when it reads back as exactly the same text, else the text
- * ("1 3/16", "0.750", "W/2", also what can't be read), so that the box always shows what somebody typed.
+ * ("1 3/16", "0.750", "W/2", also what can't be read), so that the box always shows what somebody typed. The comma of a
+ * plain figure becomes a point; in an expression it stays for the engine to judge.
  */
 export function typedExpression(text: string): Expression {
   const trimmed = text.trim();
-  const value = Number(trimmed);
-  return trimmed !== '' && Number.isFinite(value) && String(value) === trimmed ? value : trimmed;
+  const pointed = DECIMAL_COMMA.test(trimmed) ? trimmed.replace(',', '.') : trimmed;
+  const value = Number(pointed);
+  return pointed !== '' && Number.isFinite(value) && String(value) === pointed ? value : pointed;
 }
 
 /** Whether anybody in a shop reads it at sight: "1 3/16" is, "W/2" is not. */

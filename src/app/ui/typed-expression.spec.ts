@@ -10,6 +10,16 @@ describe('a typed expression', () => {
     for (const text of ['0.750', '1 3/16', 'W/2', 'abc', '', '1e3']) expect(typedExpression(text)).toBe(text);
   });
 
+  it('takes the one comma of a plain figure for its point, and no other comma', () => {
+    expect(typedExpression('0,75')).toBe(0.75);
+    expect(typedExpression(' ,5')).toBe('.5');
+    expect(typedExpression('0,750')).toBe('0.750');
+    expect(typedExpression('-1,5')).toBe(-1.5);
+    for (const text of ['1,234,5', '1,234.5', '1.234,5', '1,', ',', '1, 5', '1,5 + 1', 'max(1,5)', '1,5 mm']) {
+      expect(typedExpression(text)).toBe(text);
+    }
+  });
+
   it('is told from a fraction that is read at sight', () => {
     expect(isFraction('5/32')).toBeTrue();
     expect(isFraction('1 3/16')).toBeTrue();

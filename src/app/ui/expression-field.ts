@@ -1,6 +1,19 @@
-import { ChangeDetectionStrategy, Component, computed, type ElementRef, input, output, viewChild } from '@angular/core';
+import {
+  afterNextRender,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  type ElementRef,
+  inject,
+  Injector,
+  input,
+  output,
+  signal,
+  viewChild,
+} from '@angular/core';
 import type { Expression } from '@shared/part/document';
-import { isFraction } from '../editing/typed-expression';
+import { announceAfterPause } from './announce-after-pause';
+import { isFraction, typedExpression } from './typed-expression';
 
 let count = 0;
 
@@ -23,18 +36,18 @@ let count = 0;
       [attr.data-cell]="cell()"
       [readonly]="readOnly()"
       [value]="text()"
-      (input)="typed.emit(box.value)"
+      (input)="type(box.value)"
       (focus)="box.select()"
-      (blur)="done.emit()"
+      (blur)="leave()"
       (keydown.escape)="cancel($event)"
     />
-    @if (suffix() && !understood()) {
+    @if (suffix() && reading() === null) {
       <span class="suffix" aria-hidden="true">{{ suffix() }}</span>
     }
     @if (message() !== null && messageAt() === null) {
-      <span class="message" role="alert" [id]="id + '-message'">{{ message() }}</span>
-    } @else if (message() === null && understood() !== null) {
-      <span class="understood" [class.quiet]="quiet()" [id]="id + '-understood'">= {{ understood() }}</span>
+      <span class="message" [id]="id + '-message'">{{ message() }}</span>
+    } @else if (message() === null && reading() !== null) {
+      <span class="understood" [class.quiet]="quiet()" [id]="id + '-understood'">= {{ reading() }}</span>
     }
   `,
   styleUrl: './expression-field.scss',
@@ -58,22 +71,52 @@ export class ExpressionField {
   readonly cancelled = output();
 
   protected readonly id = `lw-expression-${++count}`;
+  private readonly injector = inject(Injector);
   private readonly box = viewChild.required<ElementRef<HTMLInputElement>>('box');
+
+  /** What is being typed, or null when the box shows what the part has. */
+  private readonly typing = signal<string | null>(null);
+
+  /** What stands in the box is left alone while it still means the same: "0,7" is on the way to "0,75". */
+  protected readonly text = computed(() => {
+    const typing = this.typing();
+    return typing !== null && typedExpression(typing) === this.value() ? typing : String(this.value());
+  });
+
+  /** What stands in the box as it was understood, where that is not plain to see. */
+  protected readonly reading = computed(() => {
+    const value = String(this.value());
+    return this.understood() ?? (this.text().trim() === value ? null : value);
+  });
 
   /** A fraction is read at sight; what it comes to is shown while somebody is at it. */
   protected readonly quiet = computed(() => isFraction(this.value()));
 
   protected readonly describedBy = computed(() => {
     if (this.message() !== null) return this.messageAt() ?? `${this.id}-message`;
-    return this.understood() === null ? null : `${this.id}-understood`;
+    return this.reading() === null ? null : `${this.id}-understood`;
   });
 
-  /** What stands in the box is left alone while it still means the same: "1." is on the way to "1.5". */
-  protected readonly text = computed(() => String(this.value()));
+  constructor() {
+    const words = computed(() => (this.message() === null ? null : `${this.label()}: ${this.message()}`));
+    announceAfterPause(words, this.text);
+  }
+
+  protected type(text: string): void {
+    this.typing.set(text);
+    this.typed.emit(text);
+  }
+
+  protected leave(): void {
+    this.typing.set(null);
+    this.done.emit();
+  }
 
   protected cancel(event: Event): void {
     event.stopPropagation();
+    this.typing.set(null);
     this.cancelled.emit();
-    this.box().nativeElement.select();
+    // Once what it had stands in the box again: writing it there would drop the selection, and the next key would add to it.
+    afterNextRender({ read: () => this.box().nativeElement.select() }, { injector: this.injector });
   }
 }

@@ -1,27 +1,4 @@
-import { roomFor, seatLabels, spread } from './spread';
-
-describe('spreading labels', () => {
-  it('leaves labels alone that have room', () => {
-    expect(spread([10, 60, 200], 40, 0, 300)).toEqual([10, 60, 200]);
-  });
-
-  it('pushes crowded labels apart about their middle', () => {
-    expect(spread([100, 110], 40, 0, 300)).toEqual([85, 125]);
-  });
-
-  it('keeps them inside the room', () => {
-    expect(spread([0, 0], 40, 0, 300)).toEqual([0, 40]);
-    expect(spread([300, 300], 40, 0, 300)).toEqual([260, 300]);
-  });
-
-  it('runs over at the end, not at the start, when the room is too small', () => {
-    expect(spread([0, 10, 20], 40, 0, 50)).toEqual([0, 40, 80]);
-  });
-
-  it('gives none for none', () => {
-    expect(spread([], 40, 0, 50)).toEqual([]);
-  });
-});
+import { roomFor, seatLabels } from './seat-labels';
 
 describe('seating labels in rows', () => {
   it('uses one row while there is room', () => {
@@ -41,6 +18,11 @@ describe('seating labels in rows', () => {
       );
       expect(tooNear).withContext(`${count} labels`).toEqual([]);
     }
+  });
+
+  it('runs over at the end, not at the start, when the room is too small', () => {
+    expect(seatLabels([0, 10, 20], 40, 0, 0, 50, 1).map(({ place }) => place)).toEqual([0, 40, 80]);
+    expect(seatLabels([], 40, 10, 0, 50)).toEqual([]);
   });
 
   it('says how much room they need', () => {

@@ -1,0 +1,17 @@
+import { ChangeDetectionStrategy, Component } from '@angular/core';
+
+/** Stands at figures of before, while something typed is broken. The figures stay readable: only the words say it. */
+@Component({
+  selector: 'lw-not-current',
+  template: 'not current: a field is to be mended',
+  styles: `
+    :host {
+      color: var(--lw-red);
+      font-size: 12.5px;
+      font-weight: 600;
+      line-height: 16px;
+    }
+  `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class NotCurrent {}
