@@ -5,6 +5,7 @@ import type { BlankView } from './blank-view';
 import { text, widthOf } from './lettering';
 import { TYPE } from './paper-size';
 import { THIN } from './pens';
+import { exactFigure } from './figures';
 import { line } from './sheet';
 import type { Mark } from './sheet';
 import { farthestMove, spread } from '../../shared/geometry/spread';
@@ -47,15 +48,22 @@ export function bendNoteWays(
   const ways: BendNotes[] = [];
   const none: BendNotes = { style: 'none', notes: [], put: [], height: 0 };
   if (bends.length === 0) return [none];
-  const notesOf = (lines: (note: LineNote) => string[]): Note[] =>
-    bends.map(({ bend, index, station }) => ({ station, lines: lines(lineNote(bend, index)) }));
+  const notesOf = (lines: (note: LineNote, radius: string) => string[]): Note[] =>
+    bends.map(({ bend, index, station }) => ({
+      station,
+      lines: lines(lineNote(bend, index), `R ${exactFigure(bend.radius, result.unit)}`),
+    }));
 
   // Within the blank the extension lines of the overall dimensions pass them by; wider only when it must be.
   const place = (pitch: number | readonly number[], ends: number): number[] | null =>
     spread(places, pitch, view.left + ends + 1, view.right - ends - 1) ??
     spread(places, pitch, view.low + ends, view.high - ends);
 
-  const stacked = notesOf(({ line, face, angle, between }) => [line, face, `${angle} (${between})`]);
+  const stacked = notesOf(({ line, face, angle, between }, radius) => [
+    `${line} · ${radius}`,
+    face,
+    `${angle} (${between})`,
+  ]);
   const widths = stacked.map(noteWidth);
   const pitches = widths.slice(1).map((width, index) => (width + (widths[index] ?? 0)) / 2 + 3);
   const level = place(pitches, Math.max(0, ...widths) / 2);
@@ -69,11 +77,11 @@ export function bendNoteWays(
   };
   upward(
     'upward',
-    notesOf(({ line, face, angle, between }) => [`${line} · ${face}`, angle, between]),
+    notesOf(({ line, face, angle, between }, radius) => [`${line} · ${face}`, `${angle} · ${radius}`, between]),
   );
   upward(
     'upward',
-    notesOf(({ line, face, angle, between }) => [`${line} · ${face}`, `${angle} (${between})`]),
+    notesOf(({ line, face, angle, between }, radius) => [`${line} · ${face}`, `${angle} (${between}) · ${radius}`]),
   );
   upward(
     'name',

@@ -17,13 +17,13 @@ const BREAK_AT = 0.8;
 
 /** The dimensioned blank in its area. */
 export function drawBlank(input: BlankPaperInput, plan: BlankPlan, area: Box): Mark[] {
-  const { result, document } = input;
+  const { result } = input;
   const { view } = plan;
   const broken = view.across === 'broken' || view.across === 'unknown';
   const breakAt = view.top + (view.bottom - view.top) * BREAK_AT;
   const holes = holeMarks(result, plan);
   return [
-    ...blankHeading(area, plan.scale.text, document.grain, result.bends.length > 0),
+    ...blankHeading(area, plan.scale.text, input),
     ...blankLines(result, plan),
     ...(broken ? breakBand(plan, breakAt) : []),
     ...holes.marks,

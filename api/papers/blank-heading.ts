@@ -1,5 +1,6 @@
 import type { Grain } from '../../shared/part/document';
 import { GRAIN_WORDS } from '../../shared/part/words';
+import type { BlankPaperInput } from './blank-paper-input';
 import { arrowhead } from './dimension';
 import { text, widthOf } from './lettering';
 import { TYPE } from './paper-size';
@@ -15,12 +16,18 @@ const KINDS: readonly (readonly [Pen, string])[] = [
 ];
 
 /** What is drawn and at what scale, which way the grain runs, and what each kind of line means. */
-export function blankHeading(area: Box, scale: string, grain: Grain | undefined, bends: boolean): Mark[] {
+export function blankHeading(area: Box, scale: string, { document, result }: BlankPaperInput): Mark[] {
   const base = area.y + 3.6;
+  const stopped = result.findings.some(({ level }) => level === 'stop');
+  const heading = `Blank in the flat, face A up · scale ${scale}`;
   const marks: Mark[] = [
-    text(`Blank in the flat, face A up · scale ${scale}`, area.x, base, { size: TYPE.heading, weight: 'semibold' }),
-    ...grainMark(area.x + area.width, base, grain),
+    text(stopped ? `STOP: can't be made as drawn, see findings · ${heading}` : heading, area.x, base, {
+      size: TYPE.heading,
+      weight: 'semibold',
+    }),
+    ...grainMark(area.x + area.width, base, document.grain),
   ];
+  const bends = result.bends.length > 0;
   if (!bends) return marks;
   let x = area.x;
   for (const [pen, words] of KINDS) {

@@ -3,6 +3,7 @@ import { drawFindings } from './findings-list';
 import { firstSheet } from './first-sheet';
 import { drawHoles, drawLegs } from './leg-and-hole-tables';
 import { text } from './lettering';
+import { drawJoggles } from './joggle-table';
 import { drawLineSchedule } from './line-schedule';
 import { PAPERS, TYPE, frameOf } from './paper-size';
 import { FRAME } from './pens';
@@ -26,6 +27,7 @@ export function layOutBlankPaper(input: BlankPaperInput): Paper {
   const flow = new SheetFlow(() => ({ width, height, marks: [rectangle(frame, FRAME)] }), area);
   if (input.result.bends.length > 0) drawLineSchedule(flow, input.result);
   else flatStrip(flow);
+  drawJoggles(flow, input.result);
   drawLegs(flow, input.result);
   drawHoles(flow, input.result, input.document);
   const findingsFrom = drawFindings(flow, input.result);

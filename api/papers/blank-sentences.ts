@@ -30,6 +30,11 @@ export function blankSentences(input: BlankPaperInput, across: Across, shown: Sh
         : 'Holes are not drawn where the width is not to scale: see the list of holes.',
     );
   }
+  if (bends.some(({ turn }) => turn === 'down')) {
+    said.push(
+      'Face A is up on the first leg. Lines with face B up are bent with the sheet turned over: mark them on face B.',
+    );
+  }
   if (document.hand === 'opposite') said.push('Opposite hand of the part as typed.');
   said.push(
     bends.length > 0

@@ -25,6 +25,6 @@ describe('figures of a paper', () => {
   });
 
   it('writes an instant to the second in universal time', () => {
-    expect(instant(new Date('2026-03-05T13:31:21.500Z'))).toBe('2026-03-05T13:31:21Z');
+    expect(instant(new Date('2026-03-05T13:31:21.500Z'))).toBe('2026-03-05 13:31:21 UTC');
   });
 });

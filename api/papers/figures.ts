@@ -40,5 +40,5 @@ export function stationFigures(value: number | null, unit: Unit): string[] {
     : [first, otherFigure(value, unit)];
 }
 
-/** "2026-12-01T13:31:21Z": to the second, in universal time. */
-export const instant = (date: Date): string => date.toISOString().replace(/\.\d+Z$/u, 'Z');
+/** "2026-12-01 13:31:21 UTC": to the second, in universal time. */
+export const instant = (date: Date): string => `${date.toISOString().slice(0, 19).replace('T', ' ')} UTC`;

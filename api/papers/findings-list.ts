@@ -41,12 +41,12 @@ export interface Summary {
   readonly lines: readonly string[];
 }
 
-/** The stops and cautions for the first sheet, as many as there is room for, and where the rest stands. */
+/** The findings for the first sheet, as many as there is room for, the gravest first, and where the rest stands. */
 export function summarise(result: Solved, room: number, most: number, sheet: number | null): Summary {
   const counted = FINDING_LEVELS.map((level) => ({ level, many: count(result.findings, level) }));
   const head = counted.map(({ level, many }) => `${many} ${level}${many === 1 ? '' : 's'}`).join(' · ');
   if (result.findings.length === 0) return { head, lines: ['The checks that were run found nothing.'] };
-  const pending = inOrder(result.findings).filter(({ level }) => level !== 'note');
+  const pending = inOrder(result.findings);
   const lines: string[] = [];
   for (const [index, finding] of pending.entries()) {
     const wrapped = wrap(`${finding.level} · ${whereOf(finding, result)}: ${finding.message}`, room, TYPE.small);

@@ -35,6 +35,7 @@ export function titleBlock(input: BlankPaperInput, box: Box, scale: string, numb
   const { unit, blank } = result;
   const withUnit = (value: number | null): string =>
     value === null ? lengthFigure(null, unit) : `${lengthFigure(value, unit)} ${unit}`;
+  const untrimmed = blank.trim.start === 0 && blank.trim.end === 0;
   const rows: Field[][] = [
     [
       { caption: 'Leafwright · shop', words: shop, share: 44 },
@@ -44,7 +45,7 @@ export function titleBlock(input: BlankPaperInput, box: Box, scale: string, numb
       { caption: 'state', words: revision.state, share: 24, weight: 'semibold' },
       {
         caption: 'version of the draft',
-        words: `${revision.version}, ${revision.changedAt.replace(/\.\d+Z$/u, 'Z')} by ${revision.changedBy}`,
+        words: `${revision.version}, ${instant(new Date(revision.changedAt))} by ${revision.changedBy}`,
         share: 43,
       },
     ],
@@ -53,7 +54,11 @@ export function titleBlock(input: BlankPaperInput, box: Box, scale: string, numb
       { caption: 'thickness T', words: `${exactFigure(result.thickness, unit)} ${unit}`, share: 26 },
       { caption: 'width of blank', words: blank.width === null ? 'not stated' : withUnit(blank.width), share: 30 },
       { caption: 'length of blank, net', words: withUnit(blank.length), share: 32, weight: 'semibold' },
-      { caption: 'length of blank, rough', words: withUnit(blank.roughLength), share: 32 },
+      {
+        caption: 'length of blank, rough',
+        words: untrimmed ? 'as net, no trim' : withUnit(blank.roughLength),
+        share: 32,
+      },
       {
         caption: 'mass of blank',
         words: blank.mass ? `${blank.mass.value.toPrecision(3)} ${blank.mass.unit}` : 'not known',

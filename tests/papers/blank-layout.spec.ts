@@ -161,6 +161,31 @@ describe('the layout of the blank paper', () => {
     expect(words.some((text) => text.startsWith('stop: '))).toBeTrue();
   });
 
+  it('gives the first sheet what a bender needs at each line: radius, and that face B is marked on its own side', () => {
+    const words = wordsOf(paperInput({ width: 9, chain: windingChain(2, 2) })).join(' ');
+    const { radius } = paperInput({ width: 9, chain: windingChain(2, 2) }).result.bends[0]!;
+    expect(words).toContain(`R ${radius.toFixed(3)}`);
+    const down = { chain: [{ leg: 1 }, { bend: 90, turn: 'down', radius: 0.16 }, { leg: 2 }] } as const;
+    expect(wordsOf(paperInput(down)).join(' ')).toContain('mark them on face B');
+    expect(wordsOf(paperInput(ANGLE)).join(' ')).not.toContain('mark them on face B');
+  });
+
+  it('says STOP over a drawing that can be drawn but not made', () => {
+    const bend = { bend: 90, turn: 'up', radius: 0.125 } as const;
+    const box = { chain: [{ leg: 1 }, bend, { leg: 2 }, bend, { leg: 1 }, bend, { leg: 2.5 }] };
+    expect(wordsOf(paperInput(box)).some((text) => text.startsWith("STOP: can't be made as drawn"))).toBeTrue();
+    expect(wordsOf(paperInput(ANGLE)).some((text) => text.startsWith('STOP'))).toBeFalse();
+  });
+
+  it('gives a joggle its depth and run', () => {
+    const chain = [{ leg: 1 }, { joggle: 0.04, run: 0.25, turn: 'up', radius: 0.125 }, { leg: 1 }] as const;
+    const words = wordsOf(paperInput({ chain: [...chain] }));
+    expect(words).toContain('Joggles');
+    expect(words).toContain('0.040');
+    expect(words).toContain('0.250');
+    expect(words.join(' ')).toContain('L1 and L2');
+  });
+
   it('marks every sheet of what is not released, and none of what is', () => {
     const marked = (input: BlankPaperInput): boolean[] =>
       layOutBlankPaper(input).sheets.map(({ marks }) => marks.some(({ kind }) => kind === 'watermark'));

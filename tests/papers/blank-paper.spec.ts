@@ -103,7 +103,7 @@ describe('the blank paper, read back', () => {
       '0.040 in',
       'FAA-H-8083-31 ch. 4',
       '1 of 2',
-      '2026-03-05T13:31:21Z by technician@harrowcreek.example',
+      '2026-03-05 13:31:21 UTC by technician@harrowcreek.example',
       'uncontrolled when printed',
       'grain across, square to the bend lines',
       'Figures are shop aids.',

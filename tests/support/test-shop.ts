@@ -36,12 +36,7 @@ export async function openTestShop(options: TestShopOptions = {}) {
   for (const [name, text] of Object.entries(options.appFiles ?? {})) writeFileSync(join(appFolder, name), text);
   const clock = { now: new Date('2026-03-02T08:00:00.000Z') };
   const config = { dataDir: join(folder, 'data'), shop: options.shop ?? 'demo', shopName: null } as const;
-  const database = await openShopDatabase(
-    config,
-    clock.now,
-    (db, now) => seedDemo(db, now, quickHash),
-    options.waits,
-  );
+  const database = await openShopDatabase(config, clock.now, (db, now) => seedDemo(db, now, quickHash), options.waits);
   const app = createApp({
     database,
     secret: 'a secret of the tests, longer than thirty-two characters',

@@ -17,8 +17,6 @@ export class PageUnderTest {
     const server = {
       part: () => answer,
       saveRevision: () => of(revision(channel, 2)),
-      blankPaper: (id: string, letter: string, size: string) =>
-        `/api/parts/${id}/revisions/${letter}/blank.pdf?size=${size}`,
     };
     const session = {
       person: signal({ id: 'me', name: 'Avery Example', email: 'a@example.org', roles }),

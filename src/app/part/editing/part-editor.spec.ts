@@ -1,6 +1,7 @@
 import { provideZonelessChangeDetection } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { setLegDimension } from '@shared/part/edits/set-leg-dimension';
+import { printTypedChain } from '@shared/part/typed-chain';
 import { NEVER } from 'rxjs';
 import { Server } from '../../server/server';
 import { channel, part } from '../sample-part';
@@ -36,7 +37,7 @@ describe('the editor of a part', () => {
 
   it('counts a typed chain as not taken while it differs from the chain as it stands', () => {
     const autosave = TestBed.inject(Autosave);
-    editor.typeChain('1 up 90 r.16 2 up 90 1');
+    editor.typeChain(printTypedChain(channel.chain));
     expect(autosave.untaken()).toBeNull();
     editor.typeChain('1 up 90 r.16 2 up 90 3');
     expect(editor.typedChain()).toBe('1 up 90 r.16 2 up 90 3');
