@@ -26,7 +26,15 @@ describe('draftFrom', () => {
     expect(document?.width).toBeUndefined();
     const filled = draftFrom(sampleValues({ width: '6', material: ' 2024-T3 ' }), null).document;
     expect(filled?.material).toBe('2024-T3');
-    expect(filled?.width).toBe('6');
+    expect(filled?.width).toBe(6);
+  });
+
+  it('reads a comma as the point of a plain figure, and a material of the table in any case', () => {
+    const { document, messages } = draftFrom(sampleValues({ thickness: '0,040', material: '7075-t6' }), null);
+    expect(messages).toEqual({});
+    expect(document?.thickness).toBe('0.040');
+    expect(document?.material).toBe('7075-T6');
+    expect(draftFrom(sampleValues({ material: 'our own' }), null).document?.material).toBe('our own');
   });
 
   it('puts each message at the box it is about', () => {

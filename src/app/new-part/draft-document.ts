@@ -1,10 +1,12 @@
 import type { Allowance, ChainEntry, PartDocument } from '@shared/part/document';
 import { DOCUMENT_FORMAT } from '@shared/part/document';
 import { STARTING_SECTIONS } from '@shared/part/starting-sections';
+import { MATERIALS } from '@shared/reference/materials';
 import { parseTypedChain } from '@shared/part/typed-chain';
 import type { Solved } from '@shared/result';
 import { solve } from '@shared/solve';
 import { evaluate } from '@shared/units/expression';
+import { typedExpression } from '../ui/typed-expression';
 import type { NewPartValues } from './new-part-form';
 
 /** Messages by field: `thickness`, `size/web`, `chain`, `document`; what belongs to no field stands under `section`. */
@@ -43,17 +45,22 @@ function composed(
 ): PartDocument | null {
   const chain = values.way === 'chain' ? typed(values, messages, chainErrors) : started(values, messages);
   if (chain === null) return null;
-  const material = values.material.trim();
+  const material = materialNamed(values.material.trim());
   return {
     format: DOCUMENT_FORMAT,
     unit: values.unit,
-    thickness: values.thickness,
+    thickness: typedExpression(values.thickness),
     ...(material === '' ? {} : { material }),
-    ...(values.width.trim() === '' ? {} : { width: values.width }),
+    ...(values.width.trim() === '' ? {} : { width: typedExpression(values.width) }),
     allowance: allowanceOf(values),
     chain,
     ...seatOf(values),
   };
+}
+
+/** "7075-t6" is the table's 7075-T6; a name that the table doesn't have stays as typed. */
+function materialNamed(typed: string): string {
+  return MATERIALS.find(({ name }) => name.toLowerCase() === typed.toLowerCase())?.name ?? typed;
 }
 
 function allowanceOf({ method, k, hardness }: NewPartValues): Allowance {
@@ -88,17 +95,19 @@ function typed(
 function started(values: NewPartValues, messages: Record<string, string>): ChainEntry[] | null {
   const section = STARTING_SECTIONS.find((entry) => entry.id === values.section);
   if (section === undefined) return null;
-  const sizes = values.sizes[section.id] ?? {};
+  const sizes = Object.fromEntries(
+    Object.entries(values.sizes[section.id] ?? {}).map(([key, text]) => [key, String(typedExpression(text))]),
+  );
   const context = { unit: values.unit, scope: new Map() };
   for (const size of section.sizes) {
     const figure = evaluate(sizes[size.key] ?? '', size.angle ? 'angle' : 'length', context);
     if (!figure.ok) messages[`size/${size.key}`] = figure.message;
     else if (figure.value <= 0) messages[`size/${size.key}`] = 'This must be more than zero.';
   }
-  const radius = evaluate(values.radius, 'length', context);
+  const radius = evaluate(typedExpression(values.radius), 'length', context);
   if (!radius.ok) messages['radius'] = radius.message;
   else if (radius.value < 0) messages['radius'] = "The bend radius can't be less than zero.";
-  return [...section.make(sizes, values.radius)];
+  return [...section.make(sizes, String(typedExpression(values.radius)))];
 }
 
 /** The engine's path to the field of this form; the first message at a field stays. */

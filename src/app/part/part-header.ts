@@ -30,7 +30,7 @@ export class PartHeader {
 
   protected readonly commands = [commandOf('undo'), commandOf('redo')];
   protected readonly saving = computed(() => saveWords(this.autosave.state(), this.autosave.untaken() !== null));
-  protected readonly isSaved = computed(() => this.autosave.state().is === 'saved');
+  protected readonly isSaved = computed(() => this.autosave.state().is === 'saved' && this.autosave.untaken() === null);
   protected readonly isLate = computed(
     () => this.autosave.untaken() !== null || !['saved', 'waiting', 'saving'].includes(this.autosave.state().is),
   );
@@ -40,7 +40,9 @@ export class PartHeader {
   protected readonly trouble = signal<string | null>(null);
   protected readonly whyNoPaper = computed(() => {
     if (this.making() !== null) return 'The paper is being made.';
-    return this.isSaved() ? '' : 'The paper is made from the saved draft; it can be had once this is saved.';
+    return this.isSaved()
+      ? ''
+      : 'The paper is made from the saved draft; it can be had once everything typed is taken and saved.';
   });
 
   /** By a request of the app and not by a link: a session that has ended is renewed in place, a failure told in words. */

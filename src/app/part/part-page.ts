@@ -10,7 +10,6 @@ import {
   viewChild,
 } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
-import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { MatProgressBarModule } from '@angular/material/progress-bar';
 import { Title } from '@angular/platform-browser';
 import { RouterLink } from '@angular/router';
@@ -22,7 +21,7 @@ import { ServerProblem } from '../server/server-problem';
 import { SessionStore } from '../session/session-store';
 import { BlankDeck } from './decks/blank-deck';
 import { FormedDeck } from './decks/formed-deck';
-import { commandFor, keyOf } from './editing/commands';
+import { commandFor, isHistoryKey, keyOf } from './editing/commands';
 import { PartEditor } from './editing/part-editor';
 import { FiguresStrip } from './figures/figures-strip';
 import { findingCounts } from './figures/gathered-findings';
@@ -54,7 +53,6 @@ type PageState =
     FormedDeck,
     Ledger,
     MatButtonModule,
-    MatButtonToggleModule,
     MatProgressBarModule,
     PartHeader,
     PartSettings,
@@ -119,9 +117,10 @@ export class PartPage {
     const target = event.target instanceof HTMLElement ? event.target : null;
     // A dialog over the page has its own keys, a box with words of its own its own undo.
     if (target?.closest('[role="dialog"], [role="menu"], [data-own-undo]')) return;
-    const command = commandFor(keyOf(event), this.editor, target);
+    const key = keyOf(event);
+    const command = commandFor(key, this.editor, target);
+    if (command || isHistoryKey(key)) event.preventDefault();
     if (!command) return;
-    event.preventDefault();
     command.run(this.editor);
     if (command.goesOn) this.ledger()?.goOn();
   }

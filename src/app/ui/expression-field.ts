@@ -1,5 +1,6 @@
 import {
   afterNextRender,
+  afterRenderEffect,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -37,7 +38,7 @@ let count = 0;
       [readonly]="readOnly()"
       [value]="text()"
       (input)="type(box.value)"
-      (focus)="box.select()"
+      (focus)="enter()"
       (blur)="leave()"
       (keydown.escape)="cancel($event)"
     />
@@ -74,6 +75,8 @@ export class ExpressionField {
   private readonly injector = inject(Injector);
   private readonly box = viewChild.required<ElementRef<HTMLInputElement>>('box');
 
+  /** Entered, and nothing typed since: the next key replaces the figure. */
+  private untouched = false;
   /** What is being typed, or null when the box shows what the part has. */
   private readonly typing = signal<string | null>(null);
 
@@ -100,14 +103,28 @@ export class ExpressionField {
   constructor() {
     const words = computed(() => (this.message() === null ? null : `${this.label()}: ${this.message()}`));
     announceAfterPause(words, this.text);
+    // A box that was left a moment ago may change this one's figure just after it was entered (the typed chain does): written
+    // there it would drop the selection, and the next key would add to the figure instead of replacing it.
+    afterRenderEffect(() => {
+      this.text();
+      const box = this.box().nativeElement;
+      if (this.untouched && document.activeElement === box) box.select();
+    });
+  }
+
+  protected enter(): void {
+    this.untouched = true;
+    this.box().nativeElement.select();
   }
 
   protected type(text: string): void {
+    this.untouched = false;
     this.typing.set(text);
     this.typed.emit(text);
   }
 
   protected leave(): void {
+    this.untouched = false;
     this.typing.set(null);
     this.done.emit();
   }

@@ -1,9 +1,9 @@
-import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 
-/** Stands at figures of before, while something typed is broken. The figures stay readable: only the words say it. */
+/** Stands at figures of before, while something typed is broken or not taken. The figures stay readable: only the words say it. */
 @Component({
   selector: 'lw-not-current',
-  template: 'not current: a field is to be mended',
+  template: '{{ why() }}',
   styles: `
     :host {
       color: var(--lw-red);
@@ -14,4 +14,6 @@ import { ChangeDetectionStrategy, Component } from '@angular/core';
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
-export class NotCurrent {}
+export class NotCurrent {
+  readonly why = input.required<string>();
+}

@@ -15,7 +15,21 @@ describe('a typed expression', () => {
     expect(typedExpression(' ,5')).toBe('.5');
     expect(typedExpression('0,750')).toBe('0.750');
     expect(typedExpression('-1,5')).toBe(-1.5);
-    for (const text of ['1,234,5', '1,234.5', '1.234,5', '1,', ',', '1, 5', '1,5 + 1', 'max(1,5)', '1,5 mm']) {
+    expect(typedExpression('0,125')).toBe(0.125);
+    expect(typedExpression('1,2345')).toBe(1.2345);
+    for (const text of [
+      '1,200',
+      '-12,500',
+      '1,234,5',
+      '1,234.5',
+      '1.234,5',
+      '1,',
+      ',',
+      '1, 5',
+      '1,5 + 1',
+      'max(1,5)',
+      '1,5 mm',
+    ]) {
       expect(typedExpression(text)).toBe(text);
     }
   });

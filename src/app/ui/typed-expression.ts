@@ -1,7 +1,9 @@
 import type { Expression } from '@shared/part/document';
 
-/** One comma between figures and nothing else: it can only be the point of a decimal. */
+/** One comma between figures and nothing else is the point of a decimal… */
 const DECIMAL_COMMA = /^-?\d*,\d+$/;
+/** …but for "1,200", which may be one and a fifth or twelve hundred: that is left for the engine to refuse. */
+const THOUSANDS = /^-?[1-9]\d{0,2},\d{3}$/;
 
 /**
  * What was typed in a box, as the document keeps it: a figure when it reads back as exactly the same text, else the text
@@ -10,7 +12,7 @@ const DECIMAL_COMMA = /^-?\d*,\d+$/;
  */
 export function typedExpression(text: string): Expression {
   const trimmed = text.trim();
-  const pointed = DECIMAL_COMMA.test(trimmed) ? trimmed.replace(',', '.') : trimmed;
+  const pointed = DECIMAL_COMMA.test(trimmed) && !THOUSANDS.test(trimmed) ? trimmed.replace(',', '.') : trimmed;
   const value = Number(pointed);
   return pointed !== '' && Number.isFinite(value) && String(value) === pointed ? value : pointed;
 }

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, type ElementRef, inject, viewChild } from '@angular/core';
+import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import { inOneLine, legName, lineNote } from '@shared/part/words';
 import { DrawingView } from '../../drawing/drawing-view';
 import { elementSize } from '../../drawing/element-size';
@@ -10,7 +11,7 @@ import { bendSentence } from '../words';
 /** The part as it will be: true faces, dimensions, mold points. */
 @Component({
   selector: 'lw-formed-deck',
-  imports: [DrawingView],
+  imports: [DrawingView, MatButtonToggleModule],
   templateUrl: './formed-deck.html',
   styleUrl: './deck.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -121,5 +121,9 @@ export function commandFor(key: string, editor: PartEditor, target: EventTarget 
   return command?.yieldsToText && holdsText(target) ? null : command;
 }
 
+/** Undo and redo are the page's own even when there is nothing to take back: the browser's would put old text into a box. */
+export const isHistoryKey = (key: string): boolean =>
+  COMMANDS.some(({ id, keys }) => (id === 'undo' || id === 'redo') && keys.includes(key));
+
 const holdsText = (target: EventTarget | null): boolean =>
   (target instanceof HTMLInputElement || target instanceof HTMLTextAreaElement) && target.value !== '';

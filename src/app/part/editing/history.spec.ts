@@ -11,6 +11,12 @@ describe('the history of a document', () => {
     expect(redo(history)).toBe(history);
   });
 
+  it('takes retyping the same for no change', () => {
+    const history = begin({ leg: 1 });
+    expect(change(history, { leg: 1 }, 'leg 0')).toBe(history);
+    expect(change(history, { leg: 2 }, 'leg 0')).not.toBe(history);
+  });
+
   it('keeps a gesture as one entry', () => {
     let history = begin('a');
     for (const typed of ['1', '1.', '1.5']) history = change(history, typed, 'leg 0');

@@ -1,4 +1,4 @@
-/** Undo and redo of whole values: they are small and never change, so keeping them all costs little. */
+/** Undo and redo of whole values (plain data): they are small and never change, so keeping them all costs little. */
 export interface History<Value> {
   readonly past: readonly Value[];
   readonly present: Value;
@@ -12,7 +12,8 @@ const DEPTH = 500;
 export const begin = <Value>(present: Value): History<Value> => ({ past: [], present, future: [], gesture: null });
 
 export function change<Value>(history: History<Value>, next: Value, gesture: string | null): History<Value> {
-  if (next === history.present) return history;
+  // Retyping what stands there is no change: it would be an undo that does nothing.
+  if (next === history.present || JSON.stringify(next) === JSON.stringify(history.present)) return history;
   if (gesture !== null && gesture === history.gesture) return { ...history, present: next, future: [] };
   return { past: [...history.past, history.present].slice(-DEPTH), present: next, future: [], gesture };
 }

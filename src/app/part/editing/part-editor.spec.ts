@@ -7,7 +7,7 @@ import { Server } from '../../server/server';
 import { channel, part } from '../sample-part';
 import { Autosave } from '../saving/autosave';
 import { LeftBehind } from '../saving/left-behind';
-import { commandFor, commandOf, keyOf } from './commands';
+import { isHistoryKey, commandFor, commandOf, keyOf } from './commands';
 import { PartEditor } from './part-editor';
 
 describe('the editor of a part', () => {
@@ -94,6 +94,15 @@ describe('the editor of a part', () => {
     expect(editor.document().unit).toBe('in');
   });
 
+  it('is not current while a typed chain waits to be taken', () => {
+    expect(editor.isCurrent()).toBeTrue();
+    editor.typeChain('1 up 90');
+    expect(editor.isCurrent()).toBeFalse();
+    expect(editor.whyNotCurrent()).toContain('typed chain');
+    editor.typeChain(null);
+    expect(editor.isCurrent()).toBeTrue();
+  });
+
   it('selects only what is there', () => {
     editor.select(4);
     expect(editor.selection()).toBe(4);
@@ -120,6 +129,9 @@ describe('the editor of a part', () => {
     expect(key({ ctrlKey: true, shiftKey: true })).toBe('Ctrl+Shift+Z');
     expect(key({ metaKey: true })).toBe('Ctrl+Z');
     expect(commandFor('Ctrl+Z', editor)).toBeNull();
+    // The page keeps the key all the same: the browser's own undo would put old text into a box.
+    expect(isHistoryKey('Ctrl+Z')).toBeTrue();
+    expect(isHistoryKey('Alt+Enter')).toBeFalse();
     setWeb(3);
     expect(commandFor('Ctrl+Z', editor)?.id).toBe('undo');
   });

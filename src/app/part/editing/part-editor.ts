@@ -44,7 +44,16 @@ export class PartEditor {
       return former && former.source.part === part ? former.value : (part?.revision.result ?? null);
     },
   });
-  readonly isCurrent = computed(() => this.result().ok);
+  /** Words in the box of the typed chain that the part does not have yet. */
+  private readonly chainWaits = computed(() => {
+    const typed = this.typed();
+    return typed !== null && typed !== printTypedChain(this.document().chain);
+  });
+  /** Whether figures and drawings are those of everything that stands typed on the page. */
+  readonly isCurrent = computed(() => this.result().ok && !this.chainWaits());
+  readonly whyNotCurrent = computed(() =>
+    this.result().ok ? 'not current: the typed chain is not taken yet' : 'not current: a field is to be mended',
+  );
   readonly canUndo = computed(() => this.mayEdit() && this.history().past.length > 0);
   readonly canRedo = computed(() => this.mayEdit() && this.history().future.length > 0);
 

@@ -20,7 +20,7 @@ const NONE = '—';
   imports: [NotCurrent],
   template: `
     @if (!editor.isCurrent()) {
-      <lw-not-current />
+      <lw-not-current [why]="editor.whyNotCurrent()" />
     }
     <dl [class.old]="!editor.isCurrent()">
       @for (one of figures(); track one.words) {

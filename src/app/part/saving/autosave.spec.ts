@@ -1,35 +1,18 @@
-import { HttpErrorResponse, HttpHeaders } from '@angular/common/http';
 import { provideZonelessChangeDetection } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { PROBLEM } from '@shared/contracts/problem';
-import type { Revision, SaveRevision } from '@shared/contracts/revisions';
 import type { PartDocument } from '@shared/part/document';
-import { Subject } from 'rxjs';
 import { Reachability } from '../../server/reachability';
 import { Server } from '../../server/server';
-import { ServerProblem } from '../../server/server-problem';
 import { channel, part, revision } from '../sample-part';
 import { Autosave } from './autosave';
+import { FakeServer, lost, problem, thicker } from './fake-server';
 import { LeftBehind } from './left-behind';
 import { LocalCopies, type LocalCopy } from './local-copies';
-import { OpenVisits } from './open-visits';
-
-interface Sent {
-  readonly save: SaveRevision;
-  readonly answer: Subject<Revision>;
-}
-
-const problem = (status: number, type: string, more: object = {}): ServerProblem =>
-  ServerProblem.of(
-    new HttpErrorResponse({ status, headers: new HttpHeaders(), error: { type, title: 'No.', status, ...more } }),
-  );
-
-const lost = (): ServerProblem => ServerProblem.of(new HttpErrorResponse({ status: 0 }));
-
-const thicker = (thickness: number): PartDocument => ({ ...channel, thickness });
 
 describe('autosave', () => {
-  let sent: Sent[];
+  let sent: FakeServer['sent'];
+  let confirm: FakeServer['confirm'];
   let autosave: Autosave;
   let copies: LocalCopies;
   let opened: PartDocument;
@@ -37,14 +20,9 @@ describe('autosave', () => {
   beforeEach(() => {
     jasmine.clock().install();
     localStorage.clear();
-    sent = [];
-    const server = {
-      saveRevision: (_id: string, _letter: string, save: SaveRevision) => {
-        const answer = new Subject<Revision>();
-        sent.push({ save, answer });
-        return answer;
-      },
-    };
+    const server = new FakeServer();
+    sent = server.sent;
+    confirm = (index, version) => server.confirm(index, version);
     TestBed.configureTestingModule({
       providers: [provideZonelessChangeDetection(), Autosave, LeftBehind, { provide: Server, useValue: server }],
     });
@@ -62,17 +40,7 @@ describe('autosave', () => {
 
   const edit = (document: PartDocument, refused = 0): void => autosave.changed(document, refused);
   const wait = (time: number): void => jasmine.clock().tick(time);
-  const confirm = (index: number, version: number): void => {
-    const one = sent[index]!;
-    one.answer.next(revision(one.save.document, version));
-    one.answer.complete();
-  };
-
   const copyOf = (id: string, person = 'me'): LocalCopy | null => copies.all(person, id, 'A')[0]?.copy ?? null;
-  const looked = async (): Promise<void> => {
-    for (let turn = 0; turn < 5; turn += 1) await Promise.resolve();
-  };
-  const lose = (index: number): void => sent[index]!.answer.error(lost());
 
   it('saves once, a moment after the last change, from the version it started from', () => {
     edit(thicker(0.05));
@@ -182,95 +150,6 @@ describe('autosave', () => {
     sent[1]!.answer.error(problem(401, PROBLEM.signedOut));
     expect(autosave.state().is).toBe('signed-out');
     expect(copyOf('p1')?.document).toEqual(thicker(0.06));
-  });
-
-  it('offers the work that earlier visits could not save, the newest first, until each is settled', async () => {
-    edit(thicker(0.05));
-    autosave.open(part(), 'me');
-    lose(0);
-    autosave.open(part(), 'me');
-    await looked();
-    expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
-    wait(10);
-    edit(thicker(0.06));
-    autosave.open(part(), 'me');
-    lose(1);
-    autosave.open(part(), 'me');
-    await looked();
-    expect(autosave.leftBehind()?.document).toEqual(thicker(0.06));
-    autosave.settleCopy();
-    expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
-    autosave.settleCopy();
-    autosave.open(part(), 'me');
-    await looked();
-    expect(autosave.leftBehind()).toBeNull();
-  });
-
-  it('does not offer what the server has already, nor the work of somebody else', async () => {
-    edit(thicker(0.05));
-    autosave.open(part(), 'me');
-    lose(0);
-    const turned = Object.fromEntries(Object.entries(thicker(0.05)).reverse()) as unknown as PartDocument;
-    autosave.open(part(turned, 2), 'me');
-    await looked();
-    expect(autosave.leftBehind()).toBeNull();
-    expect(localStorage.length).toBe(0);
-    edit(thicker(0.06));
-    autosave.open(part(), 'another');
-    lose(1);
-    autosave.open(part(), 'another');
-    await looked();
-    expect(autosave.leftBehind()).toBeNull();
-  });
-
-  it('leaves the copy alone that another tab works with, and offers it once that tab is gone', async () => {
-    const elsewhere = new OpenVisits();
-    const stay = { person: 'me', part: 'p1', letter: 'A', visit: elsewhere.begin() };
-    copies.keep(stay, { document: thicker(0.05), typed: null, version: 1, keptAt: '2026-01-05T10:00:00.000Z' });
-    autosave.open(part(), 'me');
-    await TestBed.inject(OpenVisits).ended([stay.visit]);
-    await looked();
-    expect(autosave.leftBehind()).toBeNull();
-    edit(thicker(0.06));
-    wait(900);
-    confirm(0, 2);
-    expect(copyOf('p1')?.document).toEqual(thicker(0.05));
-    elsewhere.ngOnDestroy();
-    autosave.open(part(), 'me');
-    wait(1000);
-    await looked();
-    expect(autosave.leftBehind()?.document).toEqual(thicker(0.05));
-  });
-
-  it('loses no copy where the browser has no room for another', async () => {
-    edit({ ...channel, thickness: 'abc' }, 1);
-    autosave.open(part(), 'me');
-    spyOn(Storage.prototype, 'setItem').and.throwError('full');
-    await looked();
-    edit({ ...channel, thickness: 'abd' }, 1);
-    expect(autosave.keepsCopy()).toBeFalse();
-    expect(autosave.atRisk).toBeTrue();
-    autosave.open(part(), 'me');
-    await looked();
-    expect(autosave.leftBehind()?.document?.thickness).toBe('abc');
-  });
-
-  it('keeps a typed chain that is not taken, beside a draft that is saved', async () => {
-    autosave.typed('1 upp');
-    expect(autosave.state().is).toBe('saved');
-    expect(autosave.untaken()).toBe('1 upp');
-    edit(thicker(0.05));
-    wait(900);
-    confirm(0, 2);
-    expect(copyOf('p1')).toEqual(jasmine.objectContaining({ document: null, typed: '1 upp' }));
-    autosave.open(part(thicker(0.05), 2), 'me');
-    await looked();
-    expect(autosave.untaken()).toBeNull();
-    expect(autosave.leftBehind()?.typed).toBe('1 upp');
-    autosave.settleCopy();
-    autosave.typed('1 up');
-    autosave.typed(null);
-    expect(localStorage.length).toBe(0);
   });
 
   it('sends what the part before still wanted when another one is opened, and keeps the two apart', () => {
