@@ -55,6 +55,7 @@ export class Clearance {
     let cost = 0;
     for (const line of lines) {
       const box = boxOf(line);
+      if (!contains(this.paper, box)) return CLASH;
       if (this.outline.some(box, (edge) => cross(line, edge))) return CLASH;
       if (this.lines.some(grown(box, BESIDE), (other) => cross(line, other) || tooNear(line, other))) return CLASH;
       if (this.underText(line, box)) return CLASH;
@@ -63,7 +64,7 @@ export class Clearance {
     }
     for (const line of thin) {
       const box = boxOf(line);
-      if (this.underText(line, box)) return CLASH;
+      if (!contains(this.paper, box) || this.underText(line, box)) return CLASH;
       cost += 6 * this.marks.count(box, (mark) => hits(mark, line));
       cost += 30 * this.lines.count(box, (other) => cross(line, other));
       cost += 15 * this.outline.count(box, (edge) => cross(line, edge));

@@ -39,7 +39,30 @@ function clashes(drawing: Drawing): string[] {
   });
 }
 
+/** Dimension lines, extension lines and arrowheads that run off the paper. */
+function strays({ marks, width, height }: Drawing): string[] {
+  return marks.flatMap((mark) => {
+    if (mark.kind !== 'path' || (mark.role !== 'dimension' && mark.role !== 'arrow')) return [];
+    const figures = (mark.d.match(/-?\d+(?:\.\d+)?/g) ?? []).map(Number);
+    const off = figures.some((figure, i) => figure < 0 || figure > (i % 2 === 0 ? width : height));
+    return off ? [mark.d] : [];
+  });
+}
+
 describe('the formed drawing', () => {
+  it('keeps every dimension whole on the paper, on a phone too', () => {
+    for (const shape of ['tray', 'zigzag'] as const) {
+      for (let bends = 0; bends <= 24; bends++) {
+        expect(strays(drawn(shape, bends)))
+          .withContext(`${shape} ${bends}`)
+          .toEqual([]);
+        expect(strays(drawn(shape, bends, 374, 170)))
+          .withContext(`${shape} ${bends} on a phone`)
+          .toEqual([]);
+      }
+    }
+  });
+
   it('lays no text on another and none outside, for 0 to 24 bends', () => {
     for (const shape of ['tray', 'zigzag', 'spiral'] as const) {
       for (let bends = 0; bends <= (shape === 'spiral' ? 12 : 24); bends++) {
