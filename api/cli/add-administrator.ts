@@ -1,5 +1,6 @@
 /** The command behind `npm run administrator`. */
 import { parseArgs } from 'node:util';
+import { type Role, ROLES } from '../../shared/contracts/session';
 import { readConfig } from '../config';
 import type { Database } from '../models/database';
 import { openShopDatabase } from '../open-shop-database';
@@ -8,11 +9,24 @@ import { passwordFault } from '../services/password';
 import { OtherShop } from '../services/shop';
 import { askPassword } from './ask-password';
 
-const USAGE = `npm run administrator -- --email ADDRESS --name "NAME" [--another]
+const USAGE = `npm run administrator -- --email ADDRESS --name "NAME" [--also ROLE] [--another]
 
 Adds an administrator to a shop of your own (SHOP=own, DATA_DIR as for the server).
+--also gives one more role, ${ROLES.filter((role) => role !== 'administrator').join(', ')}, and may be given several times.
 The password is asked for, or read from standard input when that is piped.
 `;
+
+function roleNamed(name: string): Role {
+  const role = ROLES.find((known) => known === name);
+  if (role === undefined) throw new Error(`There is no role "${name}". Roles are ${ROLES.join(', ')}.`);
+  return role;
+}
+
+const rest = (roles: readonly Role[]): string =>
+  roles
+    .filter((role) => role !== 'administrator')
+    .map((role) => `, and ${role}`)
+    .join('');
 
 function refuse(fault: string | null): void {
   if (fault !== null) throw new Error(fault);
@@ -37,6 +51,7 @@ async function main(): Promise<void> {
     options: {
       email: { type: 'string' },
       name: { type: 'string' },
+      also: { type: 'string', multiple: true, default: [] },
       another: { type: 'boolean', default: false },
       help: { type: 'boolean', default: false },
     },
@@ -48,13 +63,16 @@ async function main(): Promise<void> {
     return;
   }
   refuse(personalFault({ email, name }));
+  const also = values.also.map(roleNamed);
   const password = await askPassword();
   refuse(passwordFault(password));
   const database = await openOwnShop();
   try {
-    const added = await addAdministrator(database, { email, name, another, password }, new Date());
+    const added = await addAdministrator(database, { email, name, another, also, password }, new Date());
     if (!added.ok) throw new Error(added.message);
-    process.stdout.write(`${added.person.name} (${added.person.email}) is an administrator now.\n`);
+    process.stdout.write(
+      `${added.person.name} (${added.person.email}) is an administrator now${rest(added.person.roles)}.\n`,
+    );
     process.exitCode = 0;
   } finally {
     await database.close();

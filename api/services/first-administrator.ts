@@ -1,6 +1,6 @@
 /** The first administrator of a shop of one's own; who comes after is invited by somebody signed in. */
 import { z } from 'zod';
-import type { Person } from '../../shared/contracts/session';
+import type { Person, Role } from '../../shared/contracts/session';
 import { PLAIN_LINE } from '../../shared/part/schema';
 import type { Database } from '../models/database';
 import { hashPassword, passwordFault } from './password';
@@ -13,6 +13,8 @@ export interface NewAdministrator {
   readonly password: string;
   /** Wanted though there is one already. */
   readonly another: boolean;
+  /** Roles besides: whoever begins alone also draws. */
+  readonly also: readonly Role[];
 }
 
 const personal = z.object({
@@ -51,7 +53,7 @@ export async function addAdministrator(database: Database, wanted: NewAdministra
     if (people.some((person) => person.email === email.toLowerCase())) return no(`${email} is somebody’s already.`);
     const another = people.some((person) => person.active && person.roles.includes('administrator'));
     if (another && !wanted.another) return no('There is an administrator already. Add --another if you want one more.');
-    const roles = ['administrator' as const];
+    const roles = [...new Set<Role>(['administrator', ...wanted.also])];
     return { ok: true, person: await addPerson(database, { email, name, roles, passwordHash }, now, transaction) };
   });
 }

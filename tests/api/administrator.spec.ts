@@ -22,8 +22,13 @@ describe('npm run administrator', () => {
     rmSync(folder, { recursive: true, force: true });
   });
 
-  async function add(email: string, env: Record<string, string | undefined> = {}, password = PASSWORD) {
-    const args = ['--email', email, '--name', 'Ada Vane'];
+  async function add(
+    email: string,
+    env: Record<string, string | undefined> = {},
+    password = PASSWORD,
+    more: readonly string[] = [],
+  ) {
+    const args = ['--email', email, '--name', 'Ada Vane', ...more];
     const all = { SHOP: undefined, DATA_DIR: dataDir, ...env };
     const program = programs.start('api/cli/add-administrator.ts', args, all, { input: password });
     return { code: await program.ended, said: program.said.text };
@@ -42,6 +47,25 @@ describe('npm run administrator', () => {
       said: 'Ada Vane (ada@shop.example) is an administrator now.\n',
     });
     expect(await kind()).toBe('own');
+  }, 30_000);
+
+  it('gives roles besides, so that somebody alone can also draw, and knows no others', async () => {
+    const also = (...roles: string[]) =>
+      add(
+        'ada@shop.example',
+        {},
+        PASSWORD,
+        roles.flatMap((role) => ['--also', role]),
+      );
+    expect((await also('welder')).said).toMatch(/^There is no role "welder"/);
+    expect(existsSync(dataDir)).toBeFalse();
+    const added = await also('designer', 'supervisor');
+    expect(added.said).toBe('Ada Vane (ada@shop.example) is an administrator now, and designer, and supervisor.\n');
+    const database = await openShopDatabase({ dataDir, shop: 'own', shopName: null });
+    const person = await database.people.findOne({ where: { email: 'ada@shop.example' } });
+    await database.close();
+    // SQLite hands JSON back as it is stored, a text.
+    expect(JSON.parse(String(person?.roles))).toEqual(['administrator', 'designer', 'supervisor']);
   }, 30_000);
 
   it('founds nothing where the address, the password or the kind of shop is refused', async () => {

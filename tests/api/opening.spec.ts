@@ -103,7 +103,7 @@ describe('opening a shop', () => {
   it('gives an own shop its first administrator, and another only when wanted', async () => {
     const db = await open('own');
     const add = (email: string, another = false, password = PASSWORD) =>
-      addAdministrator(db, { email, name: 'Ada Vane', password, another }, NOW);
+      addAdministrator(db, { email, name: 'Ada Vane', password, another, also: [] }, NOW);
     expect(await add('Ada@Shop.example')).toEqual(jasmine.objectContaining({ ok: true }));
     expect((await personByPassword(db, 'ADA@shop.example', PASSWORD))?.roles).toEqual(['administrator']);
     expect(await add('bo@shop.example')).toEqual(jasmine.objectContaining({ ok: false }));
@@ -116,7 +116,7 @@ describe('opening a shop', () => {
 
   it('gives a demo shop no administrator of its own', async () => {
     const db = await open('demo');
-    const wanted = { email: 'ada@shop.example', name: 'Ada Vane', password: PASSWORD, another: true };
+    const wanted = { email: 'ada@shop.example', name: 'Ada Vane', password: PASSWORD, another: true, also: [] };
     expect(await addAdministrator(db, wanted, NOW)).toEqual({
       ok: false,
       message: 'A demo shop has its demo people and no others.',
