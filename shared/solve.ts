@@ -66,7 +66,13 @@ const OVERFLOW: Refused = {
 function isFinite(value: unknown): boolean {
   if (typeof value === 'number') return Number.isFinite(value);
   if (typeof value !== 'object' || value === null) return true;
-  return Object.values(value).every(isFinite);
+  // Walked without making lists of values: this sees every figure of every answer.
+  if (Array.isArray(value)) {
+    for (const entry of value) if (!isFinite(entry)) return false;
+    return true;
+  }
+  for (const key in value) if (!isFinite((value as Record<string, unknown>)[key])) return false;
+  return true;
 }
 
 function blankOf(figures: PartFigures, layout: Layout, holes: readonly HoleResult[]): Blank {

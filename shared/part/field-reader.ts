@@ -1,6 +1,6 @@
 /** Reads one expression field after another and collects what is wrong, so that a document is refused once, with everything. */
 import type { FieldError } from '../result';
-import { evaluate, type Scope } from '../units/expression';
+import { type Context, evaluate, type Scope } from '../units/expression';
 import { convertLength } from '../units/length';
 import type { Dimension } from '../units/quantity';
 import type { Expression, Unit } from './document';
@@ -19,22 +19,26 @@ export interface Limits {
 export class FieldReader {
   readonly errors: FieldError[] = [];
 
+  private readonly context: Context;
+
   constructor(
     private readonly unit: Unit,
-    private readonly scope: Scope,
-  ) {}
+    scope: Scope,
+  ) {
+    this.context = { unit, scope };
+  }
 
   length(expression: Expression, path: string, limits: Limits): number {
     const most = limits.most ?? convertLength(LARGEST_LENGTH_IN, 'in', this.unit);
-    return this.read(expression, 'length', path, { ...limits, most }, ` ${this.unit}`);
+    return this.read(expression, 'length', path, limits, most, ` ${this.unit}`);
   }
 
   angle(expression: Expression, path: string, limits: Limits): number {
-    return this.read(expression, 'angle', path, limits, '°');
+    return this.read(expression, 'angle', path, limits, limits.most, '°');
   }
 
   number(expression: Expression, path: string, limits: Limits): number {
-    return this.read(expression, 'number', path, limits, '');
+    return this.read(expression, 'number', path, limits, limits.most, '');
   }
 
   fail(path: string, message: string): void {
@@ -42,22 +46,30 @@ export class FieldReader {
   }
 
   /** NaN where the field is broken; the caller stops before it is used. */
-  private read(expression: Expression, wanted: Dimension, path: string, limits: Limits, unit: string): number {
-    const outcome = evaluate(expression, wanted, { unit: this.unit, scope: this.scope });
+  private read(
+    expression: Expression,
+    wanted: Dimension,
+    path: string,
+    { above, least, says }: Limits,
+    most: number | undefined,
+    unit: string,
+  ): number {
+    const outcome = evaluate(expression, wanted, this.context);
     if (!outcome.ok) {
       this.fail(path, outcome.message);
       return NaN;
     }
     const { value } = outcome;
-    const { above, least, most, says } = limits;
-    const shown = `${Number(value.toPrecision(6))}${unit}`;
-    if (above !== undefined && !(value > above))
-      this.fail(path, `${says} must be above ${above}${unit}; this is ${shown}.`);
-    else if (least !== undefined && !(value >= least))
-      this.fail(path, `${says} can't be below ${least}${unit}; this is ${shown}.`);
-    else if (most !== undefined && !(value <= most))
-      this.fail(path, `${says} can't be above ${most}${unit}; this is ${shown}.`);
-    else return value;
+    const broken =
+      above !== undefined && !(value > above)
+        ? `must be above ${above}`
+        : least !== undefined && !(value >= least)
+          ? `can't be below ${least}`
+          : most !== undefined && !(value <= most)
+            ? `can't be above ${most}`
+            : null;
+    if (broken === null) return value;
+    this.fail(path, `${says} ${broken}${unit}; this is ${Number(value.toPrecision(6))}${unit}.`);
     return NaN;
   }
 }

@@ -83,6 +83,8 @@ export function compile(
  * @example evaluate('1 1/8', 'length', { unit: 'in', scope: new Map() }) // { ok: true, value: 1.125 }
  */
 export function evaluate(expression: Expression, wanted: Dimension, context: Context): Evaluated<number> {
+  // A bare figure serves as any dimension; most fields of most documents are one.
+  if (typeof expression === 'number' && Number.isFinite(expression)) return { ok: true, value: expression };
   const compiled = compile(expression, context.unit, (name) => context.scope.has(name));
   if (!compiled.ok) return compiled;
   return settle(compiled.value.evaluate(context.scope), wanted, expression);
