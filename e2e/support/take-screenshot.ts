@@ -13,6 +13,7 @@ async function main(): Promise<void> {
     const { page } = await visit(browser, shop.address, {
       viewport: { width: 1440, height: 900 },
       colorScheme: 'light',
+      reducedMotion: 'reduce',
     });
     await new SignIn(page).enter('designer');
     await new Register(page).openPart('HC-2103-1');
@@ -25,6 +26,7 @@ async function main(): Promise<void> {
       .first()
       .click();
     await part.angleOfBend(2).focus();
+    await page.mouse.move(700, 880);
     await page.screenshot({ path: join(__dirname, '..', 'screenshots', 'part-light.png') });
   } finally {
     await browser.close();

@@ -16,6 +16,7 @@ const LINE = 16;
 /** From the fullest to the least: ledger and table of stations have the angle between the legs where it has no room here. */
 const WAYS: readonly ((note: LineNote) => readonly string[])[] = [
   (note) => [inOneLine(note)],
+  ({ line, face, angle, between }) => [`${line} · ${face}`, `${angle} (${between})`],
   ({ line, face, angle, between }) => [line, face, angle, between],
   ({ line, face, angle }) => [line, face, angle],
 ];
