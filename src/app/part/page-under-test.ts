@@ -48,6 +48,14 @@ export class PageUnderTest {
     return this.fixture.whenStable();
   }
 
+  /** Settles again and again until something is so; the runner's own limit ends a wait in vain. */
+  async until(so: () => boolean): Promise<void> {
+    while (!so()) {
+      await new Promise((resolve) => requestAnimationFrame(resolve));
+      await this.settled();
+    }
+  }
+
   labelled(label: string): HTMLInputElement {
     const found = this.element.querySelector<HTMLInputElement>(`[aria-label="${label}"]`);
     if (!found) throw new Error(`nothing is labelled ${label}`);

@@ -84,6 +84,23 @@ describe('the part page', () => {
     expect(page.textOf('lw-findings-list .stop')).toContain('stop');
   });
 
+  it('offers work that was left unsaved, by a moment nobody can misread, and goes on in the chain once that is settled', async () => {
+    const key = `lw-draft/me/${part().id}/${part().revision.letter}/earlier`;
+    const document = { ...channel, thickness: 0.05 };
+    localStorage.setItem(
+      key,
+      JSON.stringify({ document, typed: null, version: 1, keptAt: '2026-01-05T10:00:00.000Z' }),
+    );
+    const page = await PageUnderTest.open(of(part()));
+    await page.until(() => page.textOf('lw-saving-notices').includes('was not saved'));
+    expect(page.textOf('lw-saving-notices')).toContain('5 January 2026');
+    const discard = page.button('Discard it');
+    discard.focus();
+    discard.click();
+    await page.until(() => page.textOf('lw-saving-notices').trim() === '');
+    expect(window.document.activeElement).toBe(page.labelled('Typed chain'));
+  });
+
   it('shows a flat strip', async () => {
     const page = await PageUnderTest.open(of(part({ ...channel, chain: [{ leg: 4 }] })));
     expect(page.textOf('lw-figures-strip')).toContain('4.000');

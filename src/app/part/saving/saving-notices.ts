@@ -1,8 +1,9 @@
 import { NgTemplateOutlet } from '@angular/common';
-import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { afterNextRender, ChangeDetectionStrategy, Component, computed, inject, Injector } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { PartEditor } from '../editing/part-editor';
 import { sameDocument } from '@shared/part/same-document';
+import { momentWords } from '../../ui/when';
 import { Reachability } from '../../server/reachability';
 import { SessionStore } from '../../session/session-store';
 import { Autosave } from './autosave';
@@ -15,8 +16,10 @@ import type { LocalCopy } from './local-copies';
   templateUrl: './saving-notices.html',
   styleUrl: './saving-notices.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(click)': 'keepFocus()' },
 })
 export class SavingNotices {
+  private readonly injector = inject(Injector);
   private readonly autosave = inject(Autosave);
   private readonly session = inject(SessionStore);
   protected readonly editor = inject(PartEditor);
@@ -33,7 +36,7 @@ export class SavingNotices {
   });
 
   protected when(copy: LocalCopy): string {
-    return new Date(copy.keptAt).toLocaleString();
+    return momentWords(copy.keptAt);
   }
 
   /** The one who saved in between may be the same person in another window. */
@@ -49,6 +52,14 @@ export class SavingNotices {
 
   protected discard(): void {
     this.autosave.settleCopy();
+  }
+
+  /** A button that settles its notice goes away with it; the keyboard goes on in the chain and not at the top of the page. */
+  protected keepFocus(): void {
+    const read = (): void => {
+      if (document.activeElement === document.body) document.getElementById('lw-typed-chain')?.focus();
+    };
+    afterNextRender({ read }, { injector: this.injector });
   }
 
   protected retry(): void {
