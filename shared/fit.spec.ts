@@ -1,4 +1,4 @@
-import { fit, type Giving, type Held } from './fit';
+import { fitTo, type Giving, type Held } from './fit';
 import type { PartDocument } from './part/document';
 import { solve } from './solve';
 
@@ -37,8 +37,8 @@ function fitted(
   held: Held,
   size: number,
   giving: Giving,
-): Extract<ReturnType<typeof fit>, { ok: true }> {
-  const outcome = fit(document, held, size, giving);
+): Extract<ReturnType<typeof fitTo>, { ok: true }> {
+  const outcome = fitTo(document, held, size, giving);
   if (!outcome.ok) throw new Error(outcome.message);
   return outcome;
 }
@@ -72,7 +72,7 @@ describe('fit', () => {
 
   it('says when it can not be done', () => {
     const say = (held: Held, size: number, giving: Giving): string => {
-      const outcome = fit(CHANNEL, held, size, giving);
+      const outcome = fitTo(CHANNEL, held, size, giving);
       return outcome.ok ? 'done' : outcome.message;
     };
     expect(say({ figure: 'blank-length' }, 0, { variable: 'W' })).toContain('above 0');

@@ -42,7 +42,7 @@ const MOST_STEPS = 200;
  * @returns the changed document, the figure and the residual; or why it can't be done
  * @source secant, then bisection inside a bracket found around the figure as it stands
  */
-export function fit(document: PartDocument, held: Held, size: number, giving: Giving, shop?: unknown): Fit {
+export function fitTo(document: PartDocument, held: Held, size: number, giving: Giving, shop?: unknown): Fit {
   if (!(size > 0) || !Number.isFinite(size)) return cannot('The size to hold must be above 0.');
   const start = figureOf(document, giving, shop);
   if (start === null) return cannot('There is no such figure in this part.');
@@ -68,7 +68,7 @@ export function fit(document: PartDocument, held: Held, size: number, giving: Gi
   const bracket = bracketed(miss, start, here, step);
   if (bracket === null)
     return cannot(
-      'No figure for it gives that size: it stays on one side of it, or the part can not be made on the way.',
+      "No figure for it gives that size: it stays on one side of it, or the part can't be made on the way.",
     );
   return finish(bisected(miss, bracket), false) ?? cannot('The size jumps past the one wanted: nothing gives it.');
 }

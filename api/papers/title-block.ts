@@ -1,3 +1,4 @@
+import { formatMass } from '../../shared/section/mass';
 import type { BlankPaperInput } from './blank-paper-input';
 import { exactFigure, instant, lengthFigure } from './figures';
 import { shorten, text, wrap } from './lettering';
@@ -61,7 +62,7 @@ export function titleBlock(input: BlankPaperInput, box: Box, scale: string, numb
       },
       {
         caption: 'mass of blank',
-        words: blank.mass ? `${blank.mass.value.toPrecision(3)} ${blank.mass.unit}` : 'not known',
+        words: blank.mass ? `${formatMass(blank.mass.value)} ${blank.mass.unit}` : 'not known',
         share: 26,
       },
       { caption: 'unit', words: UNIT_WORDS[unit], share: 24 },

@@ -1,29 +1,19 @@
-import type { Browser } from 'playwright-core';
 import { NewPart } from '../pages/new-part';
 import { Part } from '../pages/part';
 import { Register } from '../pages/register';
 import { SignIn } from '../pages/sign-in';
-import { launch, visit, type Visit } from '../support/browser';
-import { openShop, type Shop } from '../support/shop';
+import { visit, type Visit } from '../support/browser';
+import { journey } from '../support/journey';
 
 describe('bad input on the part page', () => {
-  let shop: Shop;
-  let browser: Browser;
   let visitor: Visit;
   let part: Part;
-
-  beforeAll(async () => {
-    shop = await openShop();
-    browser = await launch();
+  const visited = journey(async ({ browser, shop }) => {
     visitor = await visit(browser, shop.address, { viewport: { width: 1440, height: 900 } });
     part = new Part(visitor.page);
     await new SignIn(visitor.page).enter('designer');
     await new Register(visitor.page).openPart('HC-2103-1');
     await part.saved();
-  });
-  afterAll(async () => {
-    await browser.close();
-    await shop.close();
   });
 
   const wrong: readonly (readonly [string, RegExp])[] = [
@@ -64,12 +54,12 @@ describe('bad input on the part page', () => {
   });
 
   it('keeps the work when the server is lost, and saves it when it answers again', async () => {
-    await shop.stop();
+    await visited.shop.stop();
     await part.lengthOfLeg(3).fill('1 3/8');
     await visitor.page.getByText('Your work is kept in this browser').waitFor();
     expect(await part.saving()).not.toMatch(/^saved/);
     expect(await part.lengthOfLeg(3).inputValue()).toBe('1 3/8');
-    await shop.restart();
+    await visited.shop.restart();
     await part.saved();
     await visitor.page.reload();
     await part.saved();
@@ -92,18 +82,9 @@ describe('bad input on the part page', () => {
 });
 
 describe('somebody without the role', () => {
-  let shop: Shop;
-  let browser: Browser;
   let visitor: Visit;
-
-  beforeAll(async () => {
-    shop = await openShop();
-    browser = await launch();
+  journey(async ({ browser, shop }) => {
     visitor = await visit(browser, shop.address);
-  });
-  afterAll(async () => {
-    await browser.close();
-    await shop.close();
   });
 
   it('is told that the password is wrong, and keeps the address typed', async () => {

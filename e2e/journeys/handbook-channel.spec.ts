@@ -1,11 +1,10 @@
-import type { Browser } from 'playwright-core';
 import { NewPart } from '../pages/new-part';
 import { Part } from '../pages/part';
 import { Register } from '../pages/register';
 import { SignIn } from '../pages/sign-in';
-import { launch, visit, type Visit } from '../support/browser';
+import { visit, type Visit } from '../support/browser';
+import { journey } from '../support/journey';
 import { readPdf } from '../support/read-pdf';
-import { openShop, type Shop } from '../support/shop';
 
 /**
  * FAA-H-8083-31 ch. 4, the U-channel of the flat layout: 1 × 2 × 1 in, T 0.040, R 0.16. The handbook prints flats 0.80, 1.60,
@@ -13,20 +12,11 @@ import { openShop, type Shop } from '../support/shop';
  * rule, at R 0.16, a bend takes 0.279 and the whole is 3.758.
  */
 describe('the handbook channel, from the typed chain to the paper', () => {
-  let shop: Shop;
-  let browser: Browser;
   let visitor: Visit;
   let part: Part;
-
-  beforeAll(async () => {
-    shop = await openShop();
-    browser = await launch();
+  journey(async ({ browser, shop }) => {
     visitor = await visit(browser, shop.address, { viewport: { width: 1440, height: 900 } });
     part = new Part(visitor.page);
-  });
-  afterAll(async () => {
-    await browser.close();
-    await shop.close();
   });
 
   it('begins with the sign-in of a demo shop that says it is one', async () => {

@@ -1,10 +1,9 @@
 import { AxeBuilder } from '@axe-core/playwright';
-import type { Browser } from 'playwright-core';
 import { NewPart } from '../pages/new-part';
 import { Part } from '../pages/part';
 import { SignIn } from '../pages/sign-in';
-import { launch, visit } from '../support/browser';
-import { openShop, type Shop } from '../support/shop';
+import { visit } from '../support/browser';
+import { journey } from '../support/journey';
 
 const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
 const SCREENS = [
@@ -14,20 +13,10 @@ const SCREENS = [
 ];
 
 describe('a hat from its overall sizes', () => {
-  let shop: Shop;
-  let browser: Browser;
-
-  beforeAll(async () => {
-    shop = await openShop();
-    browser = await launch();
-  });
-  afterAll(async () => {
-    await browser.close();
-    await shop.close();
-  });
+  const at = journey();
 
   it('is made, has the blank that its flats and allowances add up to, and is undone step by step', async () => {
-    const { context, page } = await visit(browser, shop.address);
+    const { context, page } = await visit(at.browser, at.shop.address);
     await new SignIn(page).enter('designer');
     const newPart = new NewPart(page);
     await newPart.open();
@@ -54,7 +43,7 @@ describe('a hat from its overall sizes', () => {
   for (const colorScheme of ['light', 'dark'] as const) {
     for (const { name, width, height } of SCREENS) {
       it(`reads well on ${name} in the ${colorScheme} theme: nothing inaccessible, nothing off the side`, async () => {
-        const { context, page, complaints } = await visit(browser, shop.address, {
+        const { context, page, complaints } = await visit(at.browser, at.shop.address, {
           viewport: { width, height },
           colorScheme,
         });

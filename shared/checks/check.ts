@@ -3,6 +3,7 @@ import type { Layout } from '../layout/lay-out';
 import type { PartFigures } from '../part/figures';
 import type { Finding, HoleResult } from '../result';
 import type { ShopRules } from '../shop/context';
+import { significant } from '../units/format';
 
 export interface CheckInput {
   readonly figures: PartFigures;
@@ -23,4 +24,4 @@ export function leastShown(value: number): string {
 }
 
 /** Figures in sentences: enough digits to act on, no more. */
-export const shown = (value: number): string => String(Number(value.toPrecision(5)));
+export const shown = (value: number): string => significant(value);

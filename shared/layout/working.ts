@@ -4,6 +4,7 @@ import { RULE_90_RADIUS, RULE_90_THICKNESS } from '../allowance/rule-90';
 import type { Allowance, Hardness, PartDocument } from '../part/document';
 import { isLeg } from '../part/document';
 import type { BendResult, Solved } from '../result';
+import { significant } from '../units/format';
 
 export interface WorkLine {
   /** What is worked out: "BA", "SB", "flat 2", "TDW". */
@@ -48,7 +49,7 @@ function ruleOf(document: PartDocument, bend: BendResult): Allowance {
 
 function bendLines(bend: BendResult, thickness: number, rule: Allowance): readonly WorkLine[] {
   const lines: WorkLine[] = [];
-  const [A, R, T] = [bend.angle, bend.radius, thickness].map(shown) as [string, string, string];
+  const [A, R, T] = [bend.angle, bend.radius, thickness].map((value) => significant(value)) as [string, string, string];
   if (bend.setback !== null) {
     lines.push({
       symbol: 'SB',
@@ -63,7 +64,7 @@ function bendLines(bend: BendResult, thickness: number, rule: Allowance): readon
     lines.push({
       symbol: 'BD',
       rule: '2 · SB − BA',
-      figures: `2 · ${shown(bend.setback!)} − ${shown(bend.allowance)}`,
+      figures: `2 · ${significant(bend.setback!)} − ${significant(bend.allowance)}`,
       value: bend.deduction,
       source: 'definition of the bend deduction',
     });
@@ -80,7 +81,7 @@ function allowanceLines(bend: BendResult, rule: Allowance, A: string, R: string,
     source,
   });
   const arc = (source: string): WorkLine =>
-    line('π/180 · A · (R + K · T)', `π/180 · ${A} · (${R} + ${shown(bend.kFactor)} · ${T})`, source);
+    line('π/180 · A · (R + K · T)', `π/180 · ${A} · (${R} + ${significant(bend.kFactor)} · ${T})`, source);
   switch (rule.method) {
     case 'handbook':
       return [
@@ -115,7 +116,7 @@ function allowanceLines(bend: BendResult, rule: Allowance, A: string, R: string,
       ];
     }
     case 'measured':
-      return [line('stated for this bend', shown(bend.allowance), 'measured')];
+      return [line('stated for this bend', significant(bend.allowance), 'measured')];
     case 'shop':
       return [arc('K from the shop’s own coupons')];
     case 'k-factor':
@@ -128,7 +129,9 @@ function totalLines(solved: Solved): readonly WorkLine[] {
   if (length === null) return [];
   const flats = legs.map((leg, i): WorkLine => {
     const symbol = `flat ${i + 1}`;
-    const figures = [leg.dimension, ...leg.setback.filter((back) => back !== 0)].map(shown).join(' − ');
+    const figures = [leg.dimension, ...leg.setback.filter((back) => back !== 0)]
+      .map((value) => significant(value))
+      .join(' − ');
     return {
       symbol,
       rule: 'dimension − setbacks',
@@ -144,7 +147,7 @@ function totalLines(solved: Solved): readonly WorkLine[] {
     {
       symbol: 'TDW',
       rule: straights.length === 0 ? 'Σ flats + Σ BA' : 'Σ flats + Σ joggle straights + Σ BA',
-      figures: added.map(shown).join(' + '),
+      figures: added.map((value) => significant(value)).join(' + '),
       value: sum(added),
       source: 'FAA-H-8083-31 ch. 4, flat layout',
     },
@@ -155,7 +158,10 @@ function totalLines(solved: Solved): readonly WorkLine[] {
     total.push({
       symbol: 'TDW',
       rule: 'Σ mold-line lengths − Σ BD',
-      figures: [lengths.map(shown).join(' + '), ...deductions.map(shown)].join(' − '),
+      figures: [
+        lengths.map((value) => significant(value)).join(' + '),
+        ...deductions.map((value) => significant(value)),
+      ].join(' − '),
       value: sum(lengths) - sum(deductions),
       source: 'the same the other way',
     });
@@ -179,4 +185,3 @@ function moldLineLengths({ legs, bends, joggles }: Solved): readonly number[] | 
 }
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
-const shown = (value: number): string => String(Number(value.toPrecision(5)));

@@ -1,6 +1,7 @@
 /** Reads one expression field after another and collects what is wrong, so that a document is refused once, with everything. */
 import type { FieldError } from '../result';
 import { type Context, evaluate, type Scope } from '../units/expression';
+import { significant } from '../units/format';
 import { convertLength } from '../units/length';
 import type { Dimension } from '../units/quantity';
 import type { Expression, Unit } from './document';
@@ -69,7 +70,7 @@ export class FieldReader {
             ? `can't be above ${most}`
             : null;
     if (broken === null) return value;
-    this.fail(path, `${says} ${broken}${unit}; this is ${Number(value.toPrecision(6))}${unit}.`);
+    this.fail(path, `${says} ${broken}${unit}; this is ${significant(value, 6)}${unit}.`);
     return NaN;
   }
 }

@@ -52,7 +52,7 @@ function prototypeVariable(path: string, holder: unknown): FieldError[] {
   const variables =
     typeof holder === 'object' && holder !== null ? (holder as { variables?: unknown }).variables : null;
   if (typeof variables !== 'object' || variables === null || !Object.hasOwn(variables, '__proto__')) return [];
-  return [{ path: `${path}variables/__proto__`, message: 'This name can not be given to a variable.' }];
+  return [{ path: `${path}variables/__proto__`, message: "This name can't be given to a variable." }];
 }
 
 function refused(errors: readonly FieldError[]): Refused {

@@ -25,6 +25,14 @@ export function formatAngle(degrees: number): string {
   return `${Number(fixed(degrees, 2))}°`;
 }
 
+/**
+ * A figure inside a sentence: so many significant digits, no trailing zeros, no unit.
+ *
+ * @param value any finite figure @param digits 1 to 100
+ * @example significant(0.279072) // '0.27907'
+ */
+export const significant = (value: number, digits = 5): string => String(Number(value.toPrecision(digits)));
+
 /** A nearest sixty-fourth: how it is written, and how far it is from the true length. */
 export interface Sixtyfourth {
   /** E.g. "51/64", "3 3/4", "0". */

@@ -20,7 +20,7 @@ export interface WhoWas {
         it is lost.
       </p>
       <p class="who">{{ who.email }}</p>
-      <lw-sign-in-form [only]="who.email" (signedIn)="close(true)" />
+      <lw-sign-in-form [email]="who.email" (signedIn)="close(true)" />
     </mat-dialog-content>
     <mat-dialog-actions>
       <button matButton type="button" (click)="close(false)">Leave this page instead</button>

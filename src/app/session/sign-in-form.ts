@@ -30,7 +30,7 @@ export class SignInForm {
   private readonly session = inject(SessionStore);
 
   /** Set when only this person may sign in here. */
-  readonly only = input<string | null>(null);
+  readonly email = input<string | null>(null);
   readonly signedIn = output();
 
   protected readonly form = inject(NonNullableFormBuilder).group({
@@ -46,8 +46,8 @@ export class SignInForm {
 
   constructor() {
     effect(() => {
-      const only = this.only();
-      if (only !== null) this.form.controls.email.setValue(only);
+      const email = this.email();
+      if (email !== null) this.form.controls.email.setValue(email);
     });
   }
 

@@ -1,14 +1,12 @@
-import { provideZonelessChangeDetection } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { PROBLEM } from '@shared/contracts/problem';
 import type { PartDocument } from '@shared/part/document';
 import { Reachability } from '../../server/reachability';
-import { Server } from '../../server/server';
 import { channel, part, revision } from '../sample-part';
-import { Autosave } from './autosave';
-import { FakeServer, lost, problem, thicker } from './fake-server';
-import { LeftBehind } from './left-behind';
-import { LocalCopies, type LocalCopy } from './local-copies';
+import { type Autosave } from './autosave';
+import { closeDraft, openDraft } from './autosave-under-test';
+import { type FakeServer, lost, problem, thicker } from './fake-server';
+import { type LocalCopies, type LocalCopy } from './local-copies';
 
 describe('autosave', () => {
   let sent: FakeServer['sent'];
@@ -17,26 +15,8 @@ describe('autosave', () => {
   let copies: LocalCopies;
   let opened: PartDocument;
 
-  beforeEach(() => {
-    jasmine.clock().install();
-    localStorage.clear();
-    const server = new FakeServer();
-    sent = server.sent;
-    confirm = (index, version) => server.confirm(index, version);
-    TestBed.configureTestingModule({
-      providers: [provideZonelessChangeDetection(), Autosave, LeftBehind, { provide: Server, useValue: server }],
-    });
-    autosave = TestBed.inject(Autosave);
-    copies = TestBed.inject(LocalCopies);
-    const first = part();
-    opened = first.revision.document;
-    autosave.open(first, 'me');
-  });
-
-  afterEach(() => {
-    jasmine.clock().uninstall();
-    localStorage.clear();
-  });
+  beforeEach(() => ({ sent, confirm, autosave, copies, opened } = openDraft()));
+  afterEach(closeDraft);
 
   const edit = (document: PartDocument, refused = 0): void => autosave.changed(document, refused);
   const wait = (time: number): void => jasmine.clock().tick(time);

@@ -1,12 +1,10 @@
-import { provideZonelessChangeDetection } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import type { PartDocument } from '@shared/part/document';
-import { Server } from '../../server/server';
 import { channel, part } from '../sample-part';
-import { Autosave } from './autosave';
-import { FakeServer, lost, thicker } from './fake-server';
-import { LeftBehind } from './left-behind';
-import { LocalCopies, type LocalCopy } from './local-copies';
+import { type Autosave } from './autosave';
+import { closeDraft, openDraft } from './autosave-under-test';
+import { type FakeServer, lost, thicker } from './fake-server';
+import { type LocalCopies, type LocalCopy } from './local-copies';
 import { OpenVisits } from './open-visits';
 
 describe('work left behind', () => {
@@ -15,24 +13,8 @@ describe('work left behind', () => {
   let autosave: Autosave;
   let copies: LocalCopies;
 
-  beforeEach(() => {
-    jasmine.clock().install();
-    localStorage.clear();
-    const server = new FakeServer();
-    sent = server.sent;
-    confirm = (index, version) => server.confirm(index, version);
-    TestBed.configureTestingModule({
-      providers: [provideZonelessChangeDetection(), Autosave, LeftBehind, { provide: Server, useValue: server }],
-    });
-    autosave = TestBed.inject(Autosave);
-    copies = TestBed.inject(LocalCopies);
-    autosave.open(part(), 'me');
-  });
-
-  afterEach(() => {
-    jasmine.clock().uninstall();
-    localStorage.clear();
-  });
+  beforeEach(() => ({ sent, confirm, autosave, copies } = openDraft()));
+  afterEach(closeDraft);
 
   const edit = (document: PartDocument, refused = 0): void => autosave.changed(document, refused);
   const wait = (time: number): void => jasmine.clock().tick(time);
